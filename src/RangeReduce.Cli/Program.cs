@@ -1,0 +1,6 @@
+namespace RangeReduce.Cli;
+
+internal static class Program
+{
+    private static int Main() => 0;
+}
