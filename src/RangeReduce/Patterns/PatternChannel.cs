@@ -11,4 +11,24 @@ public sealed record PatternChannel(double[] Re, double[]? Im)
     /// <summary>Gives the power of one sample; NaN where it is missing.</summary>
     /// <param name="at">Index into the arrays: frequency * number of angles + angle.</param>
     public double Power(int at) => (Re[at] * Re[at]) + (Im is null ? 0.0 : Im[at] * Im[at]);
+
+    /// <summary>Gives the samples multiplied by a real factor a frequency.</summary>
+    /// <param name="factor">Factors on the amplitude, one a frequency.</param>
+    public PatternChannel Scaled(double[] factor)
+    {
+        ArgumentNullException.ThrowIfNull(factor);
+        var angles = Re.Length / factor.Length;
+        return new(Times(Re), Im is null ? null : Times(Im));
+
+        double[] Times(double[] plane)
+        {
+            var scaled = new double[plane.Length];
+            for (var i = 0; i < scaled.Length; i++)
+            {
+                scaled[i] = plane[i] * factor[i / angles];
+            }
+
+            return scaled;
+        }
+    }
 }

@@ -27,6 +27,9 @@ public sealed record PatternCut
     /// <summary>Gets what 0 dB means.</summary>
     public LevelReference Reference { get; init; }
 
+    /// <summary>Gets whether the mismatch of the antenna is inside the levels, so that they are realized gain; only of use with <see cref="LevelReference.Isotropic"/>.</summary>
+    public bool IsRealized { get; init; }
+
     /// <summary>Gives whether both components with phase are there, so that every polarization figure can be made.</summary>
     public bool IsComplex => First is { HasPhase: true } && Second is { HasPhase: true };
 }

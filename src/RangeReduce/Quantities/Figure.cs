@@ -13,6 +13,9 @@ public sealed record Figure
     /// <summary>Gets the value in the unit of the quantity; NaN for a hand, and where there is no finite value (see <see cref="Why"/>).</summary>
     public double Value { get; init; } = double.NaN;
 
+    /// <summary>Gives the unit of <see cref="Value"/>: that of the quantity, or for a deviation that of the quantity that it is of.</summary>
+    public string Unit => Quantity == QuantityCatalogue.Deviation && Of is not null && QuantityCatalogue.TryGet(Of, out var of) ? of.Unit : Quantity.Unit;
+
     /// <summary>Gets the hand, for the quantity <c>hand</c> only.</summary>
     public Hand? Hand { get; init; }
 

@@ -42,6 +42,9 @@ public sealed record Trace
     /// <summary>Gets the field component.</summary>
     public FieldComponent Component { get; init; }
 
+    /// <summary>Gets the method, where the same curve can be had by more than one.</summary>
+    public string? Method { get; init; }
+
     /// <summary>Gets what made the trace.</summary>
     public FigureOrigin Origin { get; init; } = FigureOrigin.None;
 }

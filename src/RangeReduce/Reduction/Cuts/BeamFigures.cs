@@ -1,0 +1,142 @@
+using RangeReduce.Diagnostics;
+using RangeReduce.Quantities;
+
+namespace RangeReduce.Reduction.Cuts;
+
+/// <summary>Figures of the main beam and the lobes of a cut at one frequency.</summary>
+internal static class BeamFigures
+{
+    /// <summary>A cut of fewer angles has no beam to speak of.</summary>
+    public const int LeastAngles = 5;
+
+    // Two maxima closer than this in level cannot be told apart on an ordinary range (common practice).
+    private const double SameLevelDb = 0.1;
+
+    // A cut flatter than this is round: its maximum is noise and ripple.
+    private const double RoundDb = 0.5;
+
+    private const string WidthFormula = "distance of the directions 3.0103 dB under the maximum, levels in dB by a cubic between samples (IEEE Std 145)";
+    private const string LobeFormula = "highest maximum that rises by more than 0.5 dB, against the main lobe";
+
+    /// <summary>Adds the figures.</summary>
+    /// <returns>Direction of the maximum in degrees, inside the angles of the cut; NaN if no level is finite.</returns>
+    public static double Add(ReducedCut cut, CutSlice slice, CutKeys keys)
+    {
+        // The total where it is known; else the one component there is.
+        var main = cut.HasTotal ? FieldComponent.Total : cut.Components.First();
+        var level = slice.LevelDb(main);
+        if (!Beam.TryFind(slice.AngleDeg, level, out var beam))
+        {
+            keys.Context.Remarks.Add(RemarkSeverity.Doubt, "no-level", $"In {keys.Words} some frequencies have no sample with a level: they have no figures of the beam.", keys.Source.State);
+            return double.NaN;
+        }
+
+        var floorDb = FloorDb(keys, beam.PeakDb);
+        var lobes = LobeFinder.Find(slice.AngleDeg, level, floorDb: floorDb);
+        AddPeak(slice, keys, main, beam, lobes);
+        AddWidth(slice, keys, main, beam);
+        if (cut.HasEllipse && main == FieldComponent.Total)
+        {
+            AddCircularWidth(slice, keys, beam);
+        }
+
+        AddLobes(slice, keys, main, beam, lobes);
+        if (double.IsNaN(beam.BackDb))
+        {
+            keys.Context.Remarks.Add(RemarkSeverity.Note, "no-back", $"The front-to-back ratio is not given for {keys.Words}: the cut is not a closed turn.", keys.Source.State);
+        }
+        else if (beam.SpanDb >= RoundDb)
+        {
+            keys.Context.Table.Add(keys.Figure(QuantityCatalogue.FrontToBackRatio, slice.FrequencyHz, beam.PeakDb - beam.BackDb, "maximum less the level 180 degrees from it") with
+            {
+                Component = main,
+                DirectionDeg = beam.PeakDeg,
+            });
+        }
+
+        return Inside(slice.AngleDeg, beam.PeakDeg);
+    }
+
+    private static void AddPeak(CutSlice slice, CutKeys keys, FieldComponent main, Beam beam, IReadOnlyList<Lobe> lobes)
+    {
+        var rival = lobes.Count(lobe => lobe.LevelDb > beam.PeakDb - SameLevelDb) > 1;
+        if (beam.SpanDb < RoundDb || rival)
+        {
+            var why = beam.SpanDb < RoundDb ? "the cut is round within 0.5 dB" : "two lobes are equal within 0.1 dB";
+            keys.Context.Remarks.Add(RemarkSeverity.Note, "peak-not-unique", $"No direction of the maximum is given at some frequencies of {keys.Words}: {why}.", keys.Source.State);
+            return;
+        }
+
+        keys.Context.Table.Add(keys.Figure(QuantityCatalogue.PeakDirection, slice.FrequencyHz, beam.PeakDeg, "vertex of the parabola through the three highest levels in dB") with
+        {
+            Component = main,
+            At = FigurePlace.Peak,
+        });
+    }
+
+    private static void AddWidth(CutSlice slice, CutKeys keys, FieldComponent main, Beam beam)
+    {
+        if (double.IsNaN(beam.WidthDeg))
+        {
+            keys.Context.Remarks.Add(RemarkSeverity.Note, "no-beamwidth", $"No half-power beamwidth is given at some frequencies of {keys.Words}: the level does not fall 3 dB on both sides of the maximum inside the data.", keys.Source.State);
+            return;
+        }
+
+        keys.Context.Table.Add(keys.Figure(QuantityCatalogue.HalfPowerBeamwidth, slice.FrequencyHz, beam.WidthDeg, WidthFormula) with
+        {
+            Component = main == FieldComponent.Total ? FieldComponent.None : main,
+            DirectionDeg = beam.PeakDeg,
+        });
+    }
+
+    /// <summary>Adds the beamwidth of the stronger hand about its own maximum.</summary>
+    private static void AddCircularWidth(CutSlice slice, CutKeys keys, Beam total)
+    {
+        var inside = Inside(slice.AngleDeg, total.PeakDeg);
+        var component = slice.AmplitudeAt(FieldComponent.Right, inside) >= slice.AmplitudeAt(FieldComponent.Left, inside) ? FieldComponent.Right : FieldComponent.Left;
+        if (Beam.TryFind(slice.AngleDeg, slice.LevelDb(component), out var beam) && !double.IsNaN(beam.WidthDeg))
+        {
+            keys.Context.Table.Add(keys.Figure(QuantityCatalogue.HalfPowerBeamwidth, slice.FrequencyHz, beam.WidthDeg, WidthFormula) with
+            {
+                Component = component,
+                DirectionDeg = beam.PeakDeg,
+            });
+        }
+    }
+
+    private static void AddLobes(CutSlice slice, CutKeys keys, FieldComponent main, Beam beam, IReadOnlyList<Lobe> lobes)
+    {
+        // The main lobe is the one at the highest sample; the rest are given as the highest before and the highest behind.
+        var others = lobes.Skip(1).Select(lobe => (Lobe: lobe, Back: DistanceDeg(lobe.AngleDeg, beam.PeakDeg) > 90.0)).ToArray();
+        var rank = 0;
+        foreach (var (lobe, back) in others.GroupBy(other => other.Back).Select(group => group.First()).OrderByDescending(other => other.Lobe.LevelDb))
+        {
+            keys.Context.Table.Add(keys.Figure(QuantityCatalogue.SidelobeLevel, slice.FrequencyHz, lobe.LevelDb - beam.PeakDb, LobeFormula) with
+            {
+                Component = main,
+                DirectionDeg = lobe.AngleDeg,
+                Rank = ++rank,
+                BackLobe = back,
+            });
+        }
+    }
+
+    /// <summary>Gives the level under which nothing is a lobe: 10 dB above the stated noise floor.</summary>
+    private static double FloorDb(CutKeys keys, double peakDb)
+    {
+        var term = keys.Source.Source == DataSource.Measured ? keys.Context.Run.UncertaintyTerms.FirstOrDefault(term => term.Name is "noise-floor") : null;
+        return term is null ? double.NegativeInfinity : peakDb - Math.Abs(term.Value) + 10.0;
+    }
+
+    private static double DistanceDeg(double first, double second)
+    {
+        var distance = Math.Abs(first - second) % 360.0;
+        return Math.Min(distance, 360.0 - distance);
+    }
+
+    private static double Inside(double[] angleDeg, double direction)
+    {
+        var turned = direction > angleDeg[^1] ? direction - 360.0 : direction < angleDeg[0] ? direction + 360.0 : direction;
+        return Math.Clamp(turned, angleDeg[0], angleDeg[^1]);
+    }
+}

@@ -1,0 +1,7 @@
+namespace RangeReduce.Reduction;
+
+/// <summary>A lobe of a level along a cut.</summary>
+/// <param name="AngleDeg">Direction of its maximum in degrees, at a sample.</param>
+/// <param name="LevelDb">Level of its maximum in dB.</param>
+/// <param name="RiseDb">How far it stands above the higher of the two minima that part it from higher lobes (or the ends of the data); the span of the data for the highest lobe.</param>
+public readonly record struct Lobe(double AngleDeg, double LevelDb, double RiseDb);

@@ -1,0 +1,55 @@
+using System.Numerics;
+using RangeReduce.Networks;
+using RangeReduce.Numerics;
+
+namespace RangeReduce.Reduction.Sweeps;
+
+/// <summary>The reflection coefficient of one port over frequency, and between its samples.</summary>
+public sealed class ReflectionCurve
+{
+    private readonly double[] _re;
+    private readonly double[] _im;
+
+    /// <summary>Takes one port of a sweep.</summary>
+    /// <param name="sweep">The sweep.</param>
+    /// <param name="port">Port, counted from 0.</param>
+    public ReflectionCurve(NetworkSweep sweep, int port)
+    {
+        ArgumentNullException.ThrowIfNull(sweep);
+        (FrequencyHz, HasPhase, ReferenceOhm) = (sweep.FrequencyHz, sweep.HasPhase, sweep.ReferenceOhm[port]);
+        (_re, _im) = (new double[sweep.Count], new double[sweep.Count]);
+        Magnitude = new double[sweep.Count];
+        for (var i = 0; i < sweep.Count; i++)
+        {
+            var reflection = sweep[i, port, port];
+            (_re[i], _im[i], Magnitude[i]) = (reflection.Real, reflection.Imaginary, reflection.Magnitude);
+        }
+    }
+
+    /// <summary>Gets the frequencies in hertz.</summary>
+    public double[] FrequencyHz { get; }
+
+    /// <summary>Gets |Γ| at the samples.</summary>
+    public double[] Magnitude { get; }
+
+    /// <summary>Gets the real parts at the samples; magnitudes where there is no phase.</summary>
+    public double[] Re => _re;
+
+    /// <summary>Gets the imaginary parts at the samples; zeros where there is no phase.</summary>
+    public double[] Im => _im;
+
+    /// <summary>Gets whether the phase is known.</summary>
+    public bool HasPhase { get; }
+
+    /// <summary>Gets the reference impedance in ohm.</summary>
+    public double ReferenceOhm { get; }
+
+    /// <summary>Gives Γ between a sample and the next one, by a cubic in real and imaginary part.</summary>
+    /// <remarks>Real and imaginary part are smooth through a resonance where |Γ| has a sharp dip and its decibels a pole. Where there is no phase, |Γ| itself is interpolated, as a real number.</remarks>
+    public Complex Between(int segment, double frequencyHz) => new(
+        LocalCubic.Interpolate(FrequencyHz, _re, segment, frequencyHz),
+        HasPhase ? LocalCubic.Interpolate(FrequencyHz, _im, segment, frequencyHz) : 0.0);
+
+    /// <summary>Gives |Γ| between a sample and the next one.</summary>
+    public double MagnitudeBetween(int segment, double frequencyHz) => Between(segment, frequencyHz).Magnitude;
+}
