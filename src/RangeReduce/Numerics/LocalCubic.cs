@@ -18,21 +18,6 @@ public static class LocalCubic
         var first = segment > 0 && double.IsFinite(y[segment - 1]) ? segment - 1 : segment;
         var last = segment + 2 < x.Length && double.IsFinite(y[segment + 2]) ? segment + 2 : segment + 1;
 
-        var sum = 0.0;
-        for (var i = first; i <= last; i++)
-        {
-            var weight = 1.0;
-            for (var k = first; k <= last; k++)
-            {
-                if (k != i)
-                {
-                    weight *= (at - x[k]) / (x[i] - x[k]);
-                }
-            }
-
-            sum += weight * y[i];
-        }
-
-        return sum;
+        return LocalCubicKernel.Evaluate(x[first..(last + 1)], y[first..(last + 1)], at);
     }
 }

@@ -14,27 +14,20 @@ public readonly record struct Beam(double PeakDeg, double PeakDb, double LowDeg,
     /// <summary>Gives the half-power beamwidth in degrees; NaN where an edge is missing.</summary>
     public double WidthDeg => HighDeg - LowDeg;
 
-    /// <summary>Finds the main beam.</summary>
+    /// <summary>Finds the main beam; nothing is allocated.</summary>
     /// <param name="angleDeg">Angles in degrees, strictly rising.</param>
-    /// <param name="levelDb">Levels in dB; NaN where a sample is missing.</param>
+    /// <param name="levelDb">Levels in dB; NaN where a sample is missing, −∞ for an exact null.</param>
     /// <param name="beam">The beam; all NaN if no level is finite.</param>
     /// <returns>Whether there is a finite level at all.</returns>
-    public static bool TryFind(double[] angleDeg, double[] levelDb, out Beam beam)
+    public static bool TryFind(ReadOnlySpan<double> angleDeg, ReadOnlySpan<double> levelDb, out Beam beam)
     {
-        ArgumentNullException.ThrowIfNull(angleDeg);
-        ArgumentNullException.ThrowIfNull(levelDb);
         var (highest, lowest) = (-1, double.PositiveInfinity);
         for (var i = 0; i < levelDb.Length; i++)
         {
-            if (!double.IsFinite(levelDb[i]))
+            if (double.IsFinite(levelDb[i]))
             {
-                continue;
-            }
-
-            lowest = Math.Min(lowest, levelDb[i]);
-            if (highest < 0 || levelDb[i] > levelDb[highest])
-            {
-                highest = i;
+                lowest = Math.Min(lowest, levelDb[i]);
+                highest = highest < 0 || levelDb[i] > levelDb[highest] ? i : highest;
             }
         }
 
@@ -44,66 +37,41 @@ public readonly record struct Beam(double PeakDeg, double PeakDb, double LowDeg,
             return false;
         }
 
-        var curve = TurnedCurve.About(angleDeg, levelDb, highest);
-        var middle = curve.Middle;
-        var (peakDeg, peakDb) = middle > 0 && middle + 1 < curve.Y.Length
-            ? ParabolicPeak.Refine(curve.AngleDeg.AsSpan(middle - 1, 3), curve.Y.AsSpan(middle - 1, 3))
-            : (curve.AngleDeg[middle], curve.Y[middle]);
+        var curve = new TurnedSpan(angleDeg, levelDb);
+
+        // A maximum at the repeated end of a turn is the maximum at its start.
+        highest = highest < curve.Count ? highest : 0;
+        ReadOnlySpan<double> x = [curve.AngleDeg(highest - 1), curve.AngleDeg(highest), curve.AngleDeg(highest + 1)];
+        ReadOnlySpan<double> y = [curve.Y(highest - 1), curve.Y(highest), curve.Y(highest + 1)];
+        var (peakDeg, peakDb) = ParabolicPeak.Refine(x, y);
         var edge = peakDb - Decibels.HalfPower;
-        beam = new(peakDeg, peakDb, EdgeDeg(curve, edge, -1), EdgeDeg(curve, edge, +1), BackLevelDb(curve, peakDeg), peakDb - lowest);
+        beam = new(
+            peakDeg,
+            peakDb,
+            curve.EdgeDeg(highest, -1, edge, isUpper: false),
+            curve.EdgeDeg(highest, +1, edge, isUpper: false),
+            BackLevelDb(curve, highest, peakDeg),
+            peakDb - lowest);
         return true;
     }
 
-    /// <summary>Walks from the peak outward to where the level first falls below the edge; a missing sample on the way leaves the edge unknown.</summary>
-    private static double EdgeDeg(TurnedCurve curve, double edgeDb, int step)
-    {
-        for (var i = curve.Middle; i + step >= 0 && i + step < curve.Y.Length; i += step)
-        {
-            var next = curve.Y[i + step];
-            if (double.IsNaN(next))
-            {
-                return double.NaN;
-            }
-
-            if (next <= edgeDb)
-            {
-                var segment = Math.Min(i, i + step);
-                return Bisection.Root(at => Between(curve, segment, at) - edgeDb, curve.AngleDeg[segment], curve.AngleDeg[segment + 1]);
-            }
-        }
-
-        return double.NaN;
-    }
-
-    private static double BackLevelDb(TurnedCurve curve, double peakDeg)
+    private static double BackLevelDb(TurnedSpan curve, int highest, double peakDeg)
     {
         if (!curve.IsClosed)
         {
             return double.NaN;
         }
 
+        // Going on from the peak, the first sample at or beyond 180 degrees closes the segment that holds the back.
         var back = peakDeg + 180.0;
-        if (back > curve.AngleDeg[^1])
+        for (var i = highest; i <= highest + curve.Count; i++)
         {
-            back -= 360.0;
+            if (curve.AngleDeg(i) >= back)
+            {
+                return curve.AngleDeg(i) == back ? curve.Y(i) : curve.Between(i - 1, back);
+            }
         }
 
-        var found = Array.BinarySearch(curve.AngleDeg, back);
-        if (found >= 0)
-        {
-            return curve.Y[found];
-        }
-
-        var segment = Math.Clamp(~found - 1, 0, curve.AngleDeg.Length - 2);
-        return Between(curve, segment, Math.Clamp(back, curve.AngleDeg[0], curve.AngleDeg[^1]));
-    }
-
-    // A level of −∞ (an exact null) has no cubic; a straight line through it would be −∞ too, so the finite neighbour stands for it.
-    private static double Between(TurnedCurve curve, int segment, double at)
-    {
-        var (left, right) = (curve.Y[segment], curve.Y[segment + 1]);
-        return double.IsFinite(left) && double.IsFinite(right)
-            ? LocalCubic.Interpolate(curve.AngleDeg, curve.Y, segment, at)
-            : double.IsFinite(left) ? left : right;
+        return double.NaN;
     }
 }

@@ -11,23 +11,20 @@ public static class LobeFinder
     /// <param name="levelDb">Levels in dB; a missing sample ends a lobe like the end of the data.</param>
     /// <param name="leastRiseDb">Least rise in dB.</param>
     /// <param name="floorDb">Level in dB below which nothing is a lobe, such as 10 dB above the noise floor; −∞ where none is known.</param>
-    public static IReadOnlyList<Lobe> Find(double[] angleDeg, double[] levelDb, double leastRiseDb = LeastRiseDb, double floorDb = double.NegativeInfinity)
+    public static IReadOnlyList<Lobe> Find(ReadOnlySpan<double> angleDeg, ReadOnlySpan<double> levelDb, double leastRiseDb = LeastRiseDb, double floorDb = double.NegativeInfinity)
     {
-        ArgumentNullException.ThrowIfNull(angleDeg);
-        ArgumentNullException.ThrowIfNull(levelDb);
-        var closed = TurnedCurve.ClosesTurn(angleDeg);
-        var count = closed && angleDeg[^1] - angleDeg[0] > 360.0 - 1e-6 ? angleDeg.Length - 1 : angleDeg.Length;
+        var curve = new TurnedSpan(angleDeg, levelDb);
         var lobes = new List<Lobe>();
-        for (var i = 0; i < count; i++)
+        for (var i = 0; i < curve.Count; i++)
         {
             var level = levelDb[i];
-            if (!double.IsFinite(level) || level < floorDb || !IsMaximum(i))
+            if (!double.IsFinite(level) || level < floorDb || !IsMaximum(curve, i))
             {
                 continue;
             }
 
-            var (minimumLeft, endsLeft) = Descend(i, -1);
-            var (minimumRight, endsRight) = Descend(i, +1);
+            var (minimumLeft, endsLeft) = Descend(curve, i, -1);
+            var (minimumRight, endsRight) = Descend(curve, i, +1);
 
             // At the end of open data the level might still rise: only the seen side counts there.
             var saddle = endsLeft && endsRight ? Math.Min(minimumLeft, minimumRight) : endsLeft ? minimumRight : endsRight ? minimumLeft : Math.Max(minimumLeft, minimumRight);
@@ -38,48 +35,46 @@ public static class LobeFinder
         }
 
         return [.. lobes.OrderByDescending(lobe => lobe.LevelDb).ThenBy(lobe => lobe.AngleDeg)];
+    }
 
-        double At(int i) => closed ? levelDb[((i % count) + count) % count] : i < 0 || i >= count ? double.NaN : levelDb[i];
-
-        // A plateau counts once, at its first sample.
-        bool IsMaximum(int i)
+    // A plateau counts once, at its first sample; a lone sample between missing ones is no maximum.
+    private static bool IsMaximum(TurnedSpan curve, int index)
+    {
+        var (before, level) = (curve.Y(index - 1), curve.Y(index));
+        if (before >= level)
         {
-            var before = At(i - 1);
-            if (before >= levelDb[i])
-            {
-                return false;
-            }
-
-            var next = i + 1;
-            while (At(next) == levelDb[i] && next - i < count)
-            {
-                next++;
-            }
-
-            return !(At(next) > levelDb[i]) && !(double.IsNaN(before) && double.IsNaN(At(i + 1)));
+            return false;
         }
 
-        // Goes down one side until something higher stands there; tells the lowest level on the way and whether the data ended first.
-        (double Minimum, bool Ends) Descend(int from, int step)
+        var next = index + 1;
+        while (curve.Y(next) == level && next - index < curve.Count)
         {
-            var minimum = levelDb[from];
-            for (var k = 1; k < count; k++)
+            next++;
+        }
+
+        return !(curve.Y(next) > level) && !(double.IsNaN(before) && double.IsNaN(curve.Y(index + 1)));
+    }
+
+    // Goes down one side until something higher stands there; tells the lowest level on the way and whether the data ended first.
+    private static (double Minimum, bool Ends) Descend(TurnedSpan curve, int from, int step)
+    {
+        var (minimum, top) = (curve.Y(from), curve.Y(from));
+        for (var k = 1; k < curve.Count; k++)
+        {
+            var level = curve.Y(from + (k * step));
+            if (double.IsNaN(level))
             {
-                var level = At(from + (k * step));
-                if (double.IsNaN(level))
-                {
-                    return (minimum, true);
-                }
-
-                if (level > levelDb[from])
-                {
-                    return (minimum, false);
-                }
-
-                minimum = Math.Min(minimum, level);
+                return (minimum, true);
             }
 
-            return (minimum, !closed);
+            if (level > top)
+            {
+                return (minimum, false);
+            }
+
+            minimum = Math.Min(minimum, level);
         }
+
+        return (minimum, !curve.IsClosed);
     }
 }

@@ -36,20 +36,58 @@ internal static class AxialRatioBeamwidthFigure
             quotient[i] = Decibels.ToAmplitude(cross[i] - co[i]);
         }
 
-        var nearest = 0;
-        for (var i = 1; i < slice.AngleDeg.Length; i++)
-        {
-            nearest = Math.Abs(slice.AngleDeg[i] - axisDeg) < Math.Abs(slice.AngleDeg[nearest] - axisDeg) ? i : nearest;
-        }
-
-        var curve = TurnedCurve.About(slice.AngleDeg, quotient, nearest);
-        var band = BandFinder.AtMost(curve.AngleDeg, curve.Y, CrossOverCo(ThresholdDb)).Cast<Band?>().FirstOrDefault(band => band!.Value.Contains(axisDeg));
-        keys.Context.Table.Add(keys.Figure(QuantityCatalogue.AxialRatioBeamwidth, slice.FrequencyHz, band?.Width ?? 0.0, Formula) with
+        var (low, high, open) = Edges(slice.AngleDeg, quotient, axisDeg, CrossOverCo(ThresholdDb));
+        keys.Context.Table.Add(keys.Figure(QuantityCatalogue.AxialRatioBeamwidth, slice.FrequencyHz, high - low, Formula) with
         {
             Threshold = ThresholdDb,
-            DirectionDeg = band is { } found ? 0.5 * (found.Low + found.High) : null,
-            Open = band?.Open,
+            DirectionDeg = 0.5 * (low + high),
+            Open = open,
             At = FigurePlace.Axis,
         });
+    }
+
+    /// <summary>Finds the connected range about the axis over which a curve is at most a limit; nothing is allocated.</summary>
+    /// <param name="angleDeg">Angles in degrees, strictly rising.</param>
+    /// <param name="y">Ordinates, as many.</param>
+    /// <param name="axisDeg">Direction of the axis in degrees.</param>
+    /// <param name="limit">The limit.</param>
+    /// <returns>Both edges in degrees, and which of them the data cut off; both edges at the axis where the axis itself fails.</returns>
+    public static (double LowDeg, double HighDeg, string? Open) Edges(ReadOnlySpan<double> angleDeg, ReadOnlySpan<double> y, double axisDeg, double limit)
+    {
+        var nearest = 0;
+        for (var i = 1; i < angleDeg.Length; i++)
+        {
+            nearest = Math.Abs(angleDeg[i] - axisDeg) < Math.Abs(angleDeg[nearest] - axisDeg) ? i : nearest;
+        }
+
+        if (!(y[nearest] <= limit))
+        {
+            return (axisDeg, axisDeg, null);
+        }
+
+        var curve = new TurnedSpan(angleDeg, y);
+        nearest = nearest < curve.Count ? nearest : 0;
+        var (low, high) = (curve.EdgeDeg(nearest, -1, limit, isUpper: true), curve.EdgeDeg(nearest, +1, limit, isUpper: true));
+        var open = (double.IsNaN(low), double.IsNaN(high)) switch
+        {
+            (true, true) => "both",
+            (true, false) => "low",
+            (false, true) => "high",
+            _ => null,
+        };
+        return (double.IsNaN(low) ? Farthest(curve, nearest, -1) : low, double.IsNaN(high) ? Farthest(curve, nearest, +1) : high, open);
+    }
+
+    // Where an edge was not seen the range reaches to the last sample before the gap; a whole turn is parted at its far side.
+    private static double Farthest(TurnedSpan curve, int from, int step)
+    {
+        var limit = curve.IsClosed ? curve.Count / 2 : curve.Count;
+        var index = from;
+        for (var walked = 0; walked < limit && !double.IsNaN(curve.Y(index + step)); walked++)
+        {
+            index += step;
+        }
+
+        return curve.AngleDeg(index);
     }
 }
