@@ -31,12 +31,15 @@ public static class SimulationComparison
                     LowHz = null,
                     HighHz = null,
                     Open = null,
-                    Uncertainty = Uncertainty.None,
+                    Uncertainty = OfDeviation(figure),
                     Origin = new([.. figure.Origin.Inputs, .. counterpart.Origin.Inputs], figure.Origin.Corrections, "measured less simulated"),
                 });
             }
         }
     }
+
+    // A simulation states no uncertainty: a deviation has that of the measured figure, about zero like the deviation itself.
+    private static Uncertainty OfDeviation(Figure measured) => measured.Uncertainty with { Low = null, High = null };
 
     private static double Difference(Figure measured, Figure simulated)
     {

@@ -37,6 +37,7 @@ public static class StateComparison
                 FrequencyHz = more.FrequencyHz,
                 At = FigurePlace.Axis,
                 Component = more.Component,
+                Uncertainty = DifferenceUncertainty.OfSameRun(more, less),
                 Origin = new([.. more.Origin.Inputs.Concat(less.Origin.Inputs).Distinct(StringComparer.Ordinal)], more.Origin.Corrections, ContrastFormula),
             };
             table.Add(contrast);
@@ -44,8 +45,24 @@ public static class StateComparison
             {
                 Quantity = QuantityCatalogue.SwitchingReduction,
                 Value = 100.0 * (1.0 - Math.Pow(10.0, -contrast.Value / 10.0)),
+                Uncertainty = OfReduction(contrast),
                 Origin = contrast.Origin with { Formula = ReductionFormula },
             });
         }
+    }
+
+    /// <summary>Carries the uncertainty of a contrast over: the ends of its interval are turned into percent one by one, since the map is bent.</summary>
+    private static Uncertainty OfReduction(Figure contrast)
+    {
+        var expanded = contrast.Uncertainty.Expanded;
+        if (!double.IsFinite(expanded))
+        {
+            return Uncertainty.None;
+        }
+
+        var (low, high) = (Percent(contrast.Value - expanded), Percent(contrast.Value + expanded));
+        return new(0.5 * (high - low), double.NaN, contrast.Uncertainty.Budget) { Low = low, High = high };
+
+        static double Percent(double contrastDb) => 100.0 * (1.0 - Math.Pow(10.0, -contrastDb / 10.0));
     }
 }

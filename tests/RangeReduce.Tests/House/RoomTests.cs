@@ -8,7 +8,7 @@ public sealed class RoomTests
 {
     private static readonly string[][] Floors =
     [
-        ["Diagnostics"], ["Quantities", "Numerics"], ["Networks", "Patterns"], ["Runs"], ["Corrections"], ["Reduction"], ["Comparison"],
+        ["Diagnostics"], ["Quantities", "Numerics"], ["Networks", "Patterns"], ["Runs"], ["Corrections"], ["Reduction"], ["Uncertainties"], ["Comparison"],
     ];
 
     [Fact]

@@ -134,7 +134,7 @@ internal static class BeamFigures
         return Math.Min(distance, 360.0 - distance);
     }
 
-    private static double Inside(double[] angleDeg, double direction)
+    public static double Inside(double[] angleDeg, double direction)
     {
         var turned = direction > angleDeg[^1] ? direction - 360.0 : direction < angleDeg[0] ? direction + 360.0 : direction;
         return Math.Clamp(turned, angleDeg[0], angleDeg[^1]);

@@ -26,6 +26,24 @@ public sealed class ReflectionCurve
         }
     }
 
+    /// <summary>Takes a reflection coefficient as it is; the arrays are kept, not copied.</summary>
+    /// <param name="frequencyHz">Frequencies in hertz, strictly rising.</param>
+    /// <param name="re">Real parts, as many.</param>
+    /// <param name="im">Imaginary parts, as many.</param>
+    /// <param name="referenceOhm">Reference impedance in ohm.</param>
+    public ReflectionCurve(double[] frequencyHz, double[] re, double[] im, double referenceOhm)
+    {
+        ArgumentNullException.ThrowIfNull(frequencyHz);
+        ArgumentNullException.ThrowIfNull(re);
+        ArgumentNullException.ThrowIfNull(im);
+        (FrequencyHz, _re, _im, ReferenceOhm, HasPhase) = (frequencyHz, re, im, referenceOhm, true);
+        Magnitude = new double[frequencyHz.Length];
+        for (var i = 0; i < Magnitude.Length; i++)
+        {
+            Magnitude[i] = Math.Sqrt((re[i] * re[i]) + (im[i] * im[i]));
+        }
+    }
+
     /// <summary>Gets the frequencies in hertz.</summary>
     public double[] FrequencyHz { get; }
 

@@ -1,0 +1,169 @@
+using RangeReduce.Numerics;
+using RangeReduce.Patterns;
+using RangeReduce.Quantities;
+
+namespace RangeReduce.Uncertainties;
+
+/// <summary>The trials of one cut at one frequency, and what they say about its figures.</summary>
+internal sealed class CutUncertainty
+{
+    // One term at a time needs no tails, only a spread: it is known to a tenth after this many draws.
+    private const int DrawsPerTerm = 64;
+
+    private readonly double[] _values;
+    private readonly double[][] _trials;
+    private readonly (string Term, double[] Spread)[] _terms;
+    private readonly ErrorTerms _errors;
+
+    private CutUncertainty(double[] values, double[][] trials, (string Term, double[] Spread)[] terms, ErrorTerms errors) =>
+        (_values, _trials, _terms, _errors) = (values, trials, terms, errors);
+
+    /// <summary>Does the trials.</summary>
+    public static CutUncertainty Run(CutTrial trial, ErrorTerms errors, int trials, ulong seed)
+    {
+        var random = new TrialRandom(seed);
+        trial.Run(default, ref random);
+        var values = trial.Values.ToArray();
+        var results = new double[values.Length][];
+        for (var slot = 0; slot < results.Length; slot++)
+        {
+            results[slot] = new double[trials];
+        }
+
+        for (var i = 0; i < trials; i++)
+        {
+            trial.Run(CutErrors.Draw(errors, ref random), ref random);
+            for (var slot = 0; slot < results.Length; slot++)
+            {
+                results[slot][i] = trial.Values[slot];
+            }
+        }
+
+        var terms = SingleTerms(errors).Select(single => (single.Term, Spread(trial, values, single.Errors, ref random))).ToArray();
+        return new(values, results, terms, errors);
+    }
+
+    /// <summary>Gives the uncertainty of a figure of the cut; null where the trials say nothing about it.</summary>
+    public Uncertainty? Of(Figure figure)
+    {
+        if (SlotOf(figure) is not { } slot)
+        {
+            return null;
+        }
+
+        var index = (int)slot;
+        var budget = BudgetRules.StateOf(figure.Quantity, _errors.Given);
+        if (slot is not (CutSlot.AxisCrossOverCo or CutSlot.PeakCrossOverCo))
+        {
+            var trials = _trials[index].ToArray();
+            if (figure.Quantity == QuantityCatalogue.TiltAngle)
+            {
+                // An axis has no ends: turn each trial by half turns to within 90 degrees of the value.
+                trials = Array.ConvertAll(trials, tilt => figure.Value + Math.IEEERemainder(tilt - figure.Value, 180.0));
+            }
+
+            return CoverageInterval.Of(trials) is { } interval
+                ? TrialResult.Make(figure.Value, interval.Low, interval.High, interval.Standard, budget, Shares(index, 1.0))
+                : null;
+        }
+
+        return TrialResult.Quotient(_trials[index].ToArray(), _values[index]) is { } quotient ? OfQuotient(figure, index, quotient, budget) : null;
+    }
+
+    private static Uncertainty OfQuotientEnds(Figure figure, double low, double high, BudgetState budget, IReadOnlyList<UncertaintyShare> shares)
+    {
+        if (figure.Quantity == QuantityCatalogue.CrossPolarRatio)
+        {
+            var (least, most) = (-Decibels.OfAmplitude(high), low > 0.0 ? -Decibels.OfAmplitude(low) : double.PositiveInfinity);
+            return TrialResult.Make(figure.Value, least, most, (most - least) / 3.92, budget, shares);
+        }
+
+        var (atLow, atHigh) = (PolarizationEllipse.AxialRatioDb(1.0, low), PolarizationEllipse.AxialRatioDb(1.0, high));
+        return low <= 1.0 && high >= 1.0
+            ? TrialResult.Make(figure.Value, Math.Min(atLow, atHigh), double.PositiveInfinity, double.NaN, budget, shares)
+            : TrialResult.Make(figure.Value, Math.Min(atLow, atHigh), Math.Max(atLow, atHigh), Math.Abs(atHigh - atLow) / 3.92, budget, shares);
+    }
+
+    private static double[] Spread(CutTrial trial, double[] values, ErrorTerms single, ref TrialRandom random)
+    {
+        var squares = new double[values.Length];
+        var counts = new int[values.Length];
+        for (var i = 0; i < DrawsPerTerm; i++)
+        {
+            trial.Run(CutErrors.Draw(single, ref random), ref random);
+            for (var slot = 0; slot < values.Length; slot++)
+            {
+                var difference = trial.Values[slot] - values[slot];
+                if (double.IsFinite(difference))
+                {
+                    squares[slot] += difference * difference;
+                    counts[slot]++;
+                }
+            }
+        }
+
+        return [.. squares.Zip(counts, (sum, count) => count == 0 ? double.NaN : Math.Sqrt(sum / count))];
+    }
+
+    private static IEnumerable<(string Term, ErrorTerms Errors)> SingleTerms(ErrorTerms all)
+    {
+        (string Term, ErrorTerms Errors, bool IsGiven)[] singles =
+        [
+            (ErrorTerms.GainStandardKey, new() { GainStandardDb = all.GainStandardDb }, all.GainStandardDb is not null),
+            (ErrorTerms.LinearityKey, new() { LinearityDb = all.LinearityDb }, all.LinearityDb is not null),
+            (ErrorTerms.MismatchKey, new() { MismatchDb = all.MismatchDb }, all.MismatchDb is not null),
+            (ErrorTerms.ReflectivityKey, new() { Reflectivity = all.Reflectivity }, all.Reflectivity is not null),
+            (ErrorTerms.NoiseFloorKey, new() { Noise = all.Noise }, all.Noise is not null),
+            (ErrorTerms.DriftKey, new() { DriftDb = all.DriftDb }, all.DriftDb is not null),
+            (ErrorTerms.BalanceKey, new() { BalanceDb = all.BalanceDb }, all.BalanceDb is not null),
+            (ErrorTerms.BalancePhaseKey, new() { BalancePhaseDeg = all.BalancePhaseDeg }, all.BalancePhaseDeg is not null),
+            (ErrorTerms.CrossPolarKey, new() { CrossPolar = all.CrossPolar }, all.CrossPolar is not null),
+            (ErrorTerms.AlignmentKey, new() { AlignmentDeg = all.AlignmentDeg }, all.AlignmentDeg is not null),
+            (ErrorTerms.DistanceKey, new() { DistanceDb = all.DistanceDb }, all.DistanceDb is not null),
+            (ErrorTerms.RepeatabilityKey, new() { RepeatabilityDb = all.RepeatabilityDb }, all.RepeatabilityDb is not null),
+        ];
+        return singles.Where(single => single.IsGiven).Select(single => (single.Term, single.Errors));
+    }
+
+    private static CutSlot? SlotOf(Figure figure)
+    {
+        var isAxis = figure.At == FigurePlace.Axis;
+        return figure.Quantity.Id switch
+        {
+            "peak-direction" => CutSlot.PeakDirection,
+            "half-power-beamwidth" => figure.Component switch
+            {
+                FieldComponent.Right => CutSlot.RightWidth,
+                FieldComponent.Left => CutSlot.LeftWidth,
+                FieldComponent.None or FieldComponent.Total => CutSlot.TotalWidth,
+                _ => null,
+            },
+            "sidelobe-level" => figure.BackLobe is true ? CutSlot.BackLobe : CutSlot.FrontLobe,
+            "front-to-back-ratio" => CutSlot.FrontToBack,
+            "axial-ratio-beamwidth" => CutSlot.AxialRatioWidth,
+            "axial-ratio" or "cross-polar-ratio" => isAxis ? CutSlot.AxisCrossOverCo : CutSlot.PeakCrossOverCo,
+            "tilt-angle" => isAxis ? CutSlot.AxisTilt : CutSlot.PeakTilt,
+            "gain" or "level" => figure.Component switch
+            {
+                FieldComponent.Right => isAxis ? CutSlot.AxisRight : CutSlot.PeakRight,
+                FieldComponent.Left => isAxis ? CutSlot.AxisLeft : CutSlot.PeakLeft,
+                FieldComponent.Theta => isAxis ? CutSlot.AxisTheta : CutSlot.PeakTheta,
+                FieldComponent.Phi => isAxis ? CutSlot.AxisPhi : CutSlot.PeakPhi,
+                FieldComponent.Total => isAxis ? CutSlot.AxisTotal : CutSlot.PeakTotal,
+                _ => null,
+            },
+            _ => null,
+        };
+    }
+
+    private Uncertainty OfQuotient(Figure figure, int index, (double Low, double High) quotient, BudgetState budget)
+    {
+        // What a small change of the quotient does to the figure in dB: 40/(ln 10 (1 − q²)) for the axial ratio, 20/(ln 10 q) for the cross-polar ratio.
+        var q = _values[index];
+        var slope = figure.Quantity == QuantityCatalogue.AxialRatio ? 40.0 / (Math.Log(10.0) * Math.Abs(1.0 - (q * q))) : 20.0 / (Math.Log(10.0) * q);
+        return OfQuotientEnds(figure, quotient.Low, quotient.High, budget, Shares(index, slope));
+    }
+
+    private UncertaintyShare[] Shares(int slot, double slope) =>
+        [.. _terms.Select(term => new UncertaintyShare(term.Term, term.Spread[slot] * slope)).Where(share => share.Contribution > 0.0 && double.IsFinite(share.Contribution))];
+}
