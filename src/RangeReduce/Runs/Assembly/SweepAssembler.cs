@@ -32,8 +32,9 @@ internal static class SweepAssembler
         return (used.ConvertAll(each => each.Sweep), repeats);
     }
 
+    // Two sweeps that only touch at a band edge complete each other.
     private static bool Overlap(NetworkSweep a, NetworkSweep b) =>
-        a.Count > 0 && b.Count > 0 && a.FrequencyHz[0] < b.FrequencyHz[^1] && b.FrequencyHz[0] < a.FrequencyHz[^1];
+        a.Count > 0 && b.Count > 0 && ((a.FrequencyHz[0] < b.FrequencyHz[^1] && b.FrequencyHz[0] < a.FrequencyHz[^1]) || a.FrequencyHz.AsSpan().SequenceEqual(b.FrequencyHz));
 
     private static NetworkSweep Conjugate(NetworkSweep sweep) =>
         new(sweep.FrequencyHz, sweep.Ports, sweep.ReferenceOhm, sweep.Re, Array.ConvertAll(sweep.Im, value => -value)) { HasPhase = sweep.HasPhase };

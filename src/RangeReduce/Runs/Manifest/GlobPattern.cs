@@ -30,7 +30,7 @@ public sealed class GlobPattern
             text.Length is 0 or > LongestText ? "Name a file or a pattern such as right/*.s1p." :
             text.Contains('\\', StringComparison.Ordinal) ? "Write folders with forward slashes, on every platform." :
             text.Any(char.IsControl) ? "Take the control character out." :
-            text[0] == '/' || text.Contains(':', StringComparison.Ordinal) ? "Write the path relative to the measurement folder." :
+            text[0] == '/' || (text.Length > 1 && text[1] == ':') ? "Write the path relative to the measurement folder." :
             segments.Contains("..", StringComparer.Ordinal) ? "A run reads nothing outside its folder: copy the file into it." :
             segments.Any(segment => segment.Length == 0 || segment is ".") ? "Take the empty part out of the path." :
             segments.Any(segment => segment.Contains("**", StringComparison.Ordinal) && segment is not "**") ? "Two stars stand for folders and must be alone between slashes." :

@@ -67,6 +67,8 @@ internal static class ManifestChecks
             errors.Add(new(new(manifest.Path, again.Line), "duplicate-state", $"the state {FoundText.Show(again.Name)} a second time", "a name of its own for each state", "Join the two tables or rename one."));
         }
 
+        errors.AddRange(manifest.States.Where(state => string.Equals(state.Name, GainStandard.StateName, StringComparison.OrdinalIgnoreCase)).Select(state => new MeasurementDataException(
+            new(manifest.Path, state.Line), "reserved-state", FoundText.Show(state.Name), "another name", "The readings of the gain standard carry this name; call the state something else.")));
         if (names.Length == 0)
         {
             return;

@@ -6,4 +6,4 @@ namespace RangeReduce.Runs.Planning;
 /// <param name="Guess">What it seems to hold.</param>
 /// <param name="Sha256">SHA-256 of its bytes; empty where it is no data and too large to be worth it, or cannot be read.</param>
 /// <param name="Fault">What makes it unusable; null where nothing does.</param>
-internal sealed record Inspection(InputKind Guess, string Sha256, Remark? Fault);
+internal sealed record Inspection(InputKind Guess, string Sha256, MeasurementDataException? Fault);

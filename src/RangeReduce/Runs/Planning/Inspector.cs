@@ -31,12 +31,16 @@ internal static class Inspector
             || (ending.Length > 3 && ending[1] is 's' or 'S' && ending[^1] is 'p' or 'P' && ending[2..^1].All(char.IsAsciiDigit));
     }
 
+    /// <summary>Makes the error about a file that cannot be opened.</summary>
+    public static MeasurementDataException Unreadable(string path) =>
+        new(new(path), "unreadable-file", "a file that cannot be opened", "a file that may be read", "Check its permissions.");
+
     private static Inspection LookAt(FoundFile file, IInputReaders readers, CancellationToken cancellationToken)
     {
         // Pipes and devices have no length either: what is empty is never opened.
         if (file.Bytes == 0)
         {
-            var fault = HasDataEnding(file.Path) && file.PassedOver is null ? new Remark(RemarkSeverity.Fault, "empty-file", "The file is empty. Export it again.", new(file.Path)) : null;
+            var fault = HasDataEnding(file.Path) && file.PassedOver is null ? new MeasurementDataException(new(file.Path), "empty-file", "an empty file", "measurement data", "Export it again.") : null;
             return new(InputKind.Other, Convert.ToHexStringLower(SHA256.HashData([])), fault);
         }
 
@@ -64,11 +68,11 @@ internal static class Inspector
         }
         catch (Exception error) when (error is IOException or UnauthorizedAccessException)
         {
-            return new(InputKind.Other, string.Empty, new(RemarkSeverity.Fault, "unreadable-file", "The file could not be opened and is missing from the run. Check its permissions.", new(file.Path)));
+            return new(InputKind.Other, string.Empty, Unreadable(file.Path));
         }
     }
 
-    private static (InputKind Guess, Remark? Fault) Judge(FoundFile file, ReadOnlySpan<byte> head, IInputReaders readers)
+    private static (InputKind Guess, MeasurementDataException? Fault) Judge(FoundFile file, ReadOnlySpan<byte> head, IInputReaders readers)
     {
         if (file.PassedOver is not null)
         {
@@ -77,12 +81,12 @@ internal static class Inspector
 
         if (!head.ContainsAnyExcept((byte)0))
         {
-            return (InputKind.Other, new(RemarkSeverity.Fault, "zero-bytes", "The file begins with nothing but zero bytes, as after a broken copy. Copy or export it again.", new(file.Path)));
+            return (InputKind.Other, new(new(file.Path), "zero-bytes", "nothing but zero bytes at the beginning, as after a broken copy", "measurement data", "Copy or export it again."));
         }
 
         var guess = readers.Recognise(file.Path, head);
         return guess != InputKind.Other && file.Bytes > MostDataBytes
-            ? (InputKind.Other, new(RemarkSeverity.Fault, "file-too-large", "The file is larger than 1 GiB and was not read. Split it by cut or by frequency.", new(file.Path)))
+            ? (InputKind.Other, new(new(file.Path), "file-too-large", "a file of more than 1 GiB", "a file that fits into memory", "Split it by cut or by frequency."))
             : (guess, null);
     }
 }

@@ -18,6 +18,9 @@ public sealed record RunPlan
     /// <summary>Gets the states, in the order of the manifest or else of the names.</summary>
     public required IReadOnlyList<ConfigurationState> States { get; init; }
 
+    /// <summary>Gets the errors of files that could not even be looked at; they are among the remarks too.</summary>
+    public IReadOnlyList<MeasurementDataException> Faults { get; init; } = [];
+
     /// <summary>Gets what was remarked while planning.</summary>
     public required IReadOnlyList<Remark> Remarks { get; init; }
 }

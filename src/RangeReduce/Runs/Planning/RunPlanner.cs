@@ -21,7 +21,7 @@ internal static class RunPlanner
         var manifestFile = listing.Files.FirstOrDefault(file => file.Path is ManifestReader.FileName);
         var manifest = manifestFile is null ? null : ManifestReader.Read(manifestFile.FullPath, manifestFile.Path);
         var looks = Inspector.LookAt(listing.Files, readers, cancellationToken);
-        var remarks = listing.Remarks.Concat(looks.Select(look => look.Fault).OfType<Remark>()).ToList();
+        var remarks = listing.Remarks.Concat(looks.Select(look => look.Fault).OfType<MeasurementDataException>().Select(fault => fault.ToRemark())).ToList();
         if (manifest is null && listing.Files.FirstOrDefault(file => !file.Path.Contains('/', StringComparison.Ordinal) && file.Path.EndsWith(".toml", StringComparison.OrdinalIgnoreCase)) is { } misnamed)
         {
             remarks.Add(new(RemarkSeverity.Doubt, "manifest-name", "The file looks like a manifest but is not called run.toml, so it was not read.", new(misnamed.Path)));
@@ -29,7 +29,7 @@ internal static class RunPlanner
 
         var assignments = AssignAll(listing, looks, manifest, remarks);
         var files = listing.Files.Select((file, at) => Planned(file, looks[at], assignments[at], at)).ToArray();
-        return new() { Folder = folder, Manifest = manifest, Files = files, States = StatesOf(manifest, files, remarks), Remarks = remarks };
+        return new() { Folder = folder, Manifest = manifest, Files = files, Faults = [.. looks.Select(look => look.Fault).OfType<MeasurementDataException>()], States = StatesOf(manifest, files, remarks), Remarks = remarks };
     }
 
     private static Assignment[] AssignAll(RunFolderListing listing, Inspection[] looks, RunManifest? manifest, List<Remark> remarks)
