@@ -35,6 +35,9 @@ public sealed class MeasurementDataException : Exception
     /// <summary>Gets what to do.</summary>
     public string Advice { get; }
 
+    /// <summary>Gets further errors that were found in the same go, in the order of their places; empty where this is the only one.</summary>
+    public IReadOnlyList<MeasurementDataException> Others { get; init; } = [];
+
     /// <summary>Gives the error as a remark of the severity <see cref="RemarkSeverity.Fault"/>, for a run that goes on without the file.</summary>
     public Remark ToRemark() => new(RemarkSeverity.Fault, Code, $"Found {Found}, expected {Expected}. {Advice}", Place);
 }

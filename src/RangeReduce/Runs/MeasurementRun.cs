@@ -23,6 +23,12 @@ public sealed record MeasurementRun
     /// <summary>Gets the cuts, ordered by state, source, path and fixed angle.</summary>
     public IReadOnlyList<StateCut> Cuts { get; init; } = [];
 
+    /// <summary>Gets sweeps that repeat one of <see cref="Sweeps"/>: kept for repeatability, not used for figures.</summary>
+    public IReadOnlyList<StateSweep> RepeatedSweeps { get; init; } = [];
+
+    /// <summary>Gets cuts that repeat one of <see cref="Cuts"/>: kept for repeatability, not used for figures.</summary>
+    public IReadOnlyList<StateCut> RepeatedCuts { get; init; } = [];
+
     /// <summary>Gets the gain standard; null where there is none.</summary>
     public GainStandard? GainStandard { get; init; }
 

@@ -21,6 +21,15 @@ public sealed record RunInformation
     /// <summary>Gets free notes.</summary>
     public string? Notes { get; init; }
 
+    /// <summary>Gets the antenna under test.</summary>
+    public string? Antenna { get; init; }
+
+    /// <summary>Gets its serial number.</summary>
+    public string? Serial { get; init; }
+
+    /// <summary>Gets words to find the run by.</summary>
+    public IReadOnlyList<string> Tags { get; init; } = [];
+
     /// <summary>Gets the statements for the report head (laboratory, customer, item, method, issued-by, ...) by their key in the manifest.</summary>
     public IReadOnlyDictionary<string, string> ReportFields { get; init; } = new Dictionary<string, string>(StringComparer.Ordinal);
 }
