@@ -18,5 +18,6 @@ internal static class UncertaintyKeys
         ["alignment"] = [UnitDimension.Angle],
         ["distance"] = [UnitDimension.Length],
         ["repeatability"] = [UnitDimension.Ratio],
+        ["reflection-directivity"] = [UnitDimension.Ratio],
     };
 }

@@ -1,0 +1,47 @@
+using System.CommandLine;
+
+namespace RangeReduce.Cli;
+
+/// <summary>The command line: parses, calls, prints; decides nothing.</summary>
+internal static class CommandLine
+{
+    /// <summary>Runs a command line.</summary>
+    /// <param name="args">The arguments.</param>
+    /// <param name="terminal">Where to print.</param>
+    /// <param name="clock">The clock.</param>
+    /// <param name="cancellationToken">Stops the work at its next safe place.</param>
+    /// <returns>The exit code.</returns>
+    public static int Run(string[] args, Terminal terminal, TimeProvider clock, CancellationToken cancellationToken)
+    {
+        var root = new RootCommand("Turns a folder of antenna measurements into figures with uncertainty and a report.")
+        {
+            ReduceCommand.Create(terminal, clock, cancellationToken),
+            CheckCommand.Create(terminal, cancellationToken),
+        };
+        root.Options.Add(CommonOptions.Json);
+        root.Options.Add(CommonOptions.Quiet);
+        root.Options.Add(CommonOptions.NoColor);
+
+        var parsed = root.Parse(args);
+        if (parsed.Errors.Count > 0)
+        {
+            foreach (var error in parsed.Errors)
+            {
+                terminal.Error.WriteLine(error.Message);
+            }
+
+            var command = parsed.CommandResult.Command;
+            terminal.Error.WriteLine(command == root ? "Try: rangereduce --help" : $"Try: rangereduce {command.Name} --help");
+            return ExitCode.Usage;
+        }
+
+        terminal.NoColor |= parsed.GetValue(CommonOptions.NoColor);
+        return CommandRunner.Run(terminal, () => parsed.Invoke(new InvocationConfiguration
+        {
+            Output = terminal.Output,
+            Error = terminal.Error,
+            EnableDefaultExceptionHandler = false,
+            ProcessTerminationTimeout = null,
+        }));
+    }
+}
