@@ -71,7 +71,7 @@ public sealed class MeasurementRunReaderTests : IDisposable
         Assert.Equal("Turned", run.Information.Name);
         Assert.Equal("A", Assert.Single(run.States).Name);
         Assert.Equal("A run.toml", string.Join(", ", run.Inputs.Where(input => input.Kind == InputKind.Sweep).Select(input => $"{input.State} {input.Reason}")));
-        Assert.Equal(7, run.Remarks.Count(remark => remark.Code is "unlisted-file"));
+        Assert.Equal(8, run.Remarks.Count(remark => remark.Code is "unlisted-file"));
         Assert.Null(run.GainStandard);
         Assert.Equal(TimeFactor.MinusI, run.Conventions.Time);
 
@@ -113,7 +113,7 @@ public sealed class MeasurementRunReaderTests : IDisposable
         var run = MeasurementRunReader.Read(_folder.Path);
         Assert.Equal("right", Assert.Single(run.Sweeps).State);
         Assert.Contains("state right and to state left", run.Remarks.Single(remark => remark.Code is "claimed-twice").Text, StringComparison.Ordinal);
-        Assert.Equal(new SourcePlace("run.toml", 7, 26), run.Remarks.Single(remark => remark.Code is "pattern-without-file").Place);
+        Assert.Equal(new SourcePlace("run.toml", 7, 25), run.Remarks.Single(remark => remark.Code is "pattern-without-file").Place);
         Assert.Contains(run.Remarks, remark => remark is { Code: "state-without-data", State: "left" });
     }
 

@@ -29,6 +29,8 @@ public sealed class NameFactsTests
     [InlineData("horn/levels.csv", false, true)]
     [InlineData("gain-standard/table.csv", false, true)]
     [InlineData("cal/SGH_levels.csv", false, true)]
+    [InlineData("reference/levels.csv", false, true)]
+    [InlineData("reference-helix/cut.csv", false, false)]
     public void Whole_words_tell_a_simulation_and_the_gain_standard(string path, bool simulated, bool standard)
     {
         var facts = NameFacts.Of(path);
