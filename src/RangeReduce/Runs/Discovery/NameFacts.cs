@@ -56,7 +56,7 @@ internal sealed partial record NameFacts
         return new()
         {
             IsSimulated = words.Any(NameWords.IsSimulated),
-            IsGainStandard = words.Any(NameWords.IsGainStandard),
+            IsGainStandard = words.Any(NameWords.IsGainStandard) || (folderState is null && naming.Length == 0 && words.Any(NameWords.IsReference)),
             FolderState = folderState is null ? null : string.Join('-', Naming(folderState)),
             NameState = naming.Length == 0 ? null : string.Join('-', naming),
             Channel = NameWords.Of(stem) is [.., var last] ? ChannelWords.GetValueOrDefault(last) : null,
@@ -65,7 +65,7 @@ internal sealed partial record NameFacts
         };
     }
 
-    private static string[] Naming(string name) => [.. NameWords.Of(name).Where(word => !NameWords.IsSimulated(word) && !NameWords.IsGainStandard(word) && !NameWords.IsPlain(word))];
+    private static string[] Naming(string name) => [.. NameWords.Of(name).Where(word => !NameWords.IsSimulated(word) && !NameWords.IsGainStandard(word) && !NameWords.IsReference(word) && !NameWords.IsPlain(word))];
 
     private static double? NumberIn(Match match) => match.Success ? double.Parse(match.Groups["number"].ValueSpan, NumberStyles.Float, CultureInfo.InvariantCulture) : null;
 

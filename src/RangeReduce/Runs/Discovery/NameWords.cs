@@ -12,7 +12,13 @@ internal static partial class NameWords
 
     private static readonly HashSet<string> GainStandard = new(StringComparer.OrdinalIgnoreCase)
     {
-        "horn", "standard", "std", "sgh", "gainstandard", "ref", "reference",
+        "horn", "standard", "std", "sgh", "gainstandard",
+    };
+
+    // A reference may also be an antenna under test, such as a helix of known hand: it tells only where nothing names a state.
+    private static readonly HashSet<string> Reference = new(StringComparer.OrdinalIgnoreCase)
+    {
+        "ref", "reference",
     };
 
     private static readonly HashSet<string> Plain = new(StringComparer.OrdinalIgnoreCase)
@@ -31,6 +37,9 @@ internal static partial class NameWords
 
     /// <summary>Says whether a word tells of the gain standard.</summary>
     public static bool IsGainStandard(string word) => GainStandard.Contains(word);
+
+    /// <summary>Says whether a word tells of the gain standard where no other word names a state.</summary>
+    public static bool IsReference(string word) => Reference.Contains(word);
 
     /// <summary>Says whether a word tells of the kind of file, the channel, the angle or the number of a repeat, and so not of a state.</summary>
     public static bool IsPlain(string word) => Plain.Contains(word) || Measure().IsMatch(word);

@@ -67,7 +67,9 @@ public static class RunFolder
                 else
                 {
                     var own = here.Own || (here.Depth == 0 && OwnOutput.Writes(entry.Name, isFolder: false) && OwnOutput.IsIn(root));
-                    files.Add(new(relative, entry.FullName, ((FileInfo)entry).Length, PassedOver(entry.Name, relative, own)));
+                    // The length of a link is that of its text, so the target is asked.
+                    var real = entry.LinkTarget is null ? (FileInfo)entry : new(RealPath.Of(entry.FullName)!);
+                    files.Add(new(relative, real.FullName, real.Length, PassedOver(entry.Name, relative, own)));
                 }
 
                 if (files.Count > MostFiles)

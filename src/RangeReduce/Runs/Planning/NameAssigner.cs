@@ -72,6 +72,11 @@ internal sealed class NameAssigner
             return (KnownIn(words) ?? words, "file name");
         }
 
+        if (_folderStates.Length == 1)
+        {
+            return (_folderStates[0], "only state");
+        }
+
         if (_folderStates.Length > 0)
         {
             _remarks.Add(new(RemarkSeverity.Doubt, "state-unnamed", $"Neither folder nor file name tells the state, while other files have one; it was called {OnlyState}.", new(path), OnlyState));
