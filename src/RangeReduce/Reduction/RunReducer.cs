@@ -56,7 +56,12 @@ public static class RunReducer
         }
 
         var cuts = run.Cuts.Where(cut => cut.Source == source && string.Equals(cut.State, state, StringComparison.Ordinal)).DistinctBy(CutKey).ToArray();
-        var kinds = cuts.GroupBy(cut => (cut.Cut.Basis, cut.Cut.Reference)).ToArray();
+
+        // Two linear components with phase tell everything, so they give the figures without a method; other kinds stand beside them.
+        var kinds = cuts.GroupBy(cut => (cut.Cut.Basis, cut.Cut.Reference))
+            .OrderByDescending(kind => kind.All(cut => cut.Cut.IsComplex))
+            .ThenBy(kind => kind.Key.Basis)
+            .ToArray();
         foreach (var kind in kinds)
         {
             // Only where a state was taken with two kinds of probe must its figures say which.

@@ -19,7 +19,8 @@ internal static class CutJoiner
             var first = used.Count;
             foreach (var cut in ByChannel(ByFrequency(group)))
             {
-                var same = used.Skip(first).FirstOrDefault(known => known.SharesComponent(cut) && known.SharesFrequency(cut));
+                // Readings of the gain standard differ in how it was turned, which no key says: none repeats another.
+                var same = cut.State is null ? null : used.Skip(first).FirstOrDefault(known => known.SharesComponent(cut) && known.SharesFrequency(cut));
                 if (same is null)
                 {
                     used.Add(cut);

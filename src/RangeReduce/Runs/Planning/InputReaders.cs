@@ -1,16 +1,58 @@
+using RangeReduce.Networks.Touchstone;
+using RangeReduce.Patterns.Tables;
 using RangeReduce.Runs.Manifest;
 
 namespace RangeReduce.Runs.Planning;
 
-/// <summary>The readers of the house.</summary>
+/// <summary>The readers of the house: Touchstone and tables.</summary>
 internal sealed class InputReaders : IInputReaders
 {
     /// <summary>All readers.</summary>
     public static readonly IInputReaders All = new InputReaders();
 
-    /// <inheritdoc/>
-    public InputKind Recognise(string path, ReadOnlySpan<byte> head) => InputKind.Other;
+    private static readonly string[] TableEndings = [".csv", ".tsv", ".txt", ".dat", ".asc", ".cut"];
 
     /// <inheritdoc/>
-    public InputContent Read(string fullPath, string displayPath, IReadOnlyList<ManifestColumn> columns) => throw new NotSupportedException();
+    public InputKind Recognise(string path, ReadOnlySpan<byte> head)
+    {
+        var ending = Path.GetExtension(path);
+        if (IsTouchstoneEnding(ending) || TouchstoneReader.LooksLikeTouchstone(head))
+        {
+            return InputKind.Sweep;
+        }
+
+        return TableEndings.Contains(ending, StringComparer.OrdinalIgnoreCase) ? InputKind.Cut : InputKind.Other;
+    }
+
+    /// <inheritdoc/>
+    public InputContent Read(string fullPath, string displayPath, IReadOnlyList<ManifestColumn> columns)
+    {
+        if (IsTouchstoneEnding(Path.GetExtension(displayPath)) || LooksLikeTouchstone(fullPath))
+        {
+            var file = TouchstoneReader.Read(fullPath, displayPath);
+            return new() { Sweep = file.Sweep, Remarks = file.Remarks };
+        }
+
+        var meanings = columns.GroupBy(column => column.Heading, StringComparer.OrdinalIgnoreCase).ToDictionary(group => group.Key, group => group.First().Meaning, StringComparer.OrdinalIgnoreCase);
+        var table = TableReader.Read(fullPath, displayPath, new() { Columns = meanings });
+        return new()
+        {
+            Sweep = table.Sweep,
+            Cuts = table.Cuts,
+            GainTable = table.Gain is { } gain ? (gain.FrequencyHz, gain.GainDbi) : null,
+            Columns = [.. table.Columns.Select(column => new ColumnDescription(column.Heading, column.Unit.Length == 0 ? column.Meaning : $"{column.Meaning} ({column.Unit})"))],
+            Remarks = table.Remarks,
+        };
+    }
+
+    private static bool IsTouchstoneEnding(string ending) =>
+        ending.Equals(".ts", StringComparison.OrdinalIgnoreCase)
+        || (ending.Length > 3 && ending[1] is 's' or 'S' && ending[^1] is 'p' or 'P' && ending[2..^1].All(char.IsAsciiDigit));
+
+    private static bool LooksLikeTouchstone(string fullPath)
+    {
+        Span<byte> head = stackalloc byte[4096];
+        using var stream = new FileStream(fullPath, FileMode.Open, FileAccess.Read, FileShare.Read, bufferSize: 0);
+        return TouchstoneReader.LooksLikeTouchstone(head[..stream.ReadAtLeast(head, head.Length, throwOnEndOfStream: false)]);
+    }
 }
