@@ -3,8 +3,8 @@ namespace RangeReduce.Numerics;
 /// <summary>The polynomial through two to four samples, for loops that must not allocate.</summary>
 internal static class LocalCubicKernel
 {
-    // Each halving gains one bit; 48 leave an edge of a beam known to far below a millionth of a step.
-    private const int Halvings = 48;
+    // A cubic between two samples needs about six steps of the Illinois rule; more are a safeguard against a double bend.
+    private const int MostSteps = 40;
 
     /// <summary>Evaluates Lagrange's polynomial through all given samples.</summary>
     public static double Evaluate(ReadOnlySpan<double> x, ReadOnlySpan<double> y, double at)
@@ -42,24 +42,37 @@ internal static class LocalCubicKernel
             }
         }
 
+        // Regula falsi with the Illinois rule (an end that stays twice counts half): keeps the bracket, converges superlinearly.
         var (low, high) = (x[left], x[left + 1]);
-        var lowIsBelow = y[left] < level;
-        for (var i = 0; i < Halvings; i++)
+        var (atLow, atHigh) = (y[left] - level, y[left + 1] - level);
+        var tolerance = 1e-10 * (high - low);
+        var kept = 0;
+        for (var step = 0; step < MostSteps && high - low > tolerance && atHigh != atLow; step++)
         {
-            var middle = 0.5 * (low + high);
+            var at = ((low * atHigh) - (high * atLow)) / (atHigh - atLow);
             var value = c[n - 1];
             for (var k = n - 2; k >= 0; k--)
             {
-                value = (value * (middle - x[k])) + c[k];
+                value = (value * (at - x[k])) + c[k];
             }
 
-            if (value < level == lowIsBelow)
+            value -= level;
+            if (Math.Abs(value) < 1e-12)
             {
-                low = middle;
+                return at;
+            }
+
+            if (value < 0.0 == atLow < 0.0)
+            {
+                (low, atLow) = (at, value);
+                atHigh = kept < 0 ? 0.5 * atHigh : atHigh;
+                kept = -1;
             }
             else
             {
-                high = middle;
+                (high, atHigh) = (at, value);
+                atLow = kept > 0 ? 0.5 * atLow : atLow;
+                kept = 1;
             }
         }
 

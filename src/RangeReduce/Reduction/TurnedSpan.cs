@@ -116,15 +116,10 @@ public readonly ref struct TurnedSpan
             return false;
         }
 
-        // The gap over the seam may not be wider than the widest step of the data.
+        // The gap over the seam may not be wider than the steps beside it.
         var span = angleDeg[^1] - angleDeg[0];
-        var widest = 0.0;
-        for (var i = 1; i < angleDeg.Length; i++)
-        {
-            widest = Math.Max(widest, angleDeg[i] - angleDeg[i - 1]);
-        }
-
-        return span + widest >= FullTurnDeg - SameDirectionDeg && span <= FullTurnDeg + SameDirectionDeg;
+        var beside = Math.Max(angleDeg[1] - angleDeg[0], angleDeg[^1] - angleDeg[^2]);
+        return span + beside >= FullTurnDeg - SameDirectionDeg && span <= FullTurnDeg + SameDirectionDeg;
     }
 
     /// <summary>Collects the samples around a segment; infinite ones (exact nulls) count as missing neighbours.</summary>

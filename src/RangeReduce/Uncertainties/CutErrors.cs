@@ -24,8 +24,8 @@ internal struct CutErrors
     /// <summary>Stray ray on the second port against the peak, at the first angle.</summary>
     public (double Re, double Im) SecondStray;
 
-    /// <summary>Turns of the phase of the stray ray over the cut.</summary>
-    public double StrayTurns;
+    /// <summary>Whole turns of the phase of the stray ray over the cut, up to <see cref="StrayTable.MostTurns"/> either way.</summary>
+    public int StrayTurns;
 
     /// <summary>Change of level from the first to the last angle in dB.</summary>
     public double DriftDb;
@@ -35,9 +35,6 @@ internal struct CutErrors
 
     /// <summary>Root mean square of the complex noise against the peak.</summary>
     public double Noise;
-
-    // A stray ray comes and goes a few times while the antenna turns once; how often is not known.
-    private const double MostStrayTurns = 12.0;
 
     /// <summary>Draws all errors.</summary>
     public static CutErrors Draw(ErrorTerms terms, ref TrialRandom random)
@@ -51,7 +48,7 @@ internal struct CutErrors
                 + ((terms.MismatchDb ?? 0.0) * Math.Sin(2.0 * Math.PI * random.Uniform())),
             BalanceDb = random.Rectangular(terms.BalanceDb ?? 0.0),
             BalancePhaseDeg = random.Rectangular(terms.BalancePhaseDeg ?? 0.0),
-            StrayTurns = random.Rectangular(MostStrayTurns),
+            StrayTurns = (int)Math.Floor(random.Uniform() * ((2 * StrayTable.MostTurns) + 1)) - StrayTable.MostTurns,
             DriftDb = random.Rectangular(terms.DriftDb ?? 0.0),
             AngleDeg = random.Rectangular(terms.AlignmentDeg ?? 0.0),
             Noise = terms.Noise ?? 0.0,

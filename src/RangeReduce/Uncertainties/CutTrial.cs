@@ -1,3 +1,4 @@
+using System.Numerics;
 using RangeReduce.Numerics;
 using RangeReduce.Patterns;
 using RangeReduce.Quantities;
@@ -12,6 +13,9 @@ internal sealed class CutTrial
     private const double InverseRootTwo = 0.70710678118654752440;
 
     private readonly double[] _angleDeg;
+    private readonly int _padded;
+    private readonly StrayTable _stray;
+    private readonly double[] _noise;
     private readonly double[] _firstRe;
     private readonly double[] _firstIm;
     private readonly double[] _secondRe;
@@ -47,15 +51,20 @@ internal sealed class CutTrial
         _angleDeg = cut.Cut.AngleDeg;
         var n = _angleDeg.Length;
         var start = frequency * n;
-        _firstRe = first.Re.AsSpan(start, n).ToArray();
-        _firstIm = first.Im is null ? new double[n] : first.Im.AsSpan(start, n).ToArray();
-        _secondRe = second.Re.AsSpan(start, n).ToArray();
-        _secondIm = second.Im is null ? new double[n] : second.Im.AsSpan(start, n).ToArray();
+
+        // Planes are padded to whole vectors; what lies in the padding is never looked at.
+        _padded = (n + Vector<double>.Count - 1) / Vector<double>.Count * Vector<double>.Count;
+        _firstRe = Padded(first.Re);
+        _firstIm = Padded(first.Im);
+        _secondRe = Padded(second.Re);
+        _secondIm = Padded(second.Im);
+        _stray = new(_padded);
+        _noise = new double[4 * _padded];
         _isLinear = cut.Cut.Basis == PolarizationBasis.ThetaPhi;
         _hasPhase = cut.Cut.IsComplex;
         (_axisDeg, _frontLobeDeg, _backLobeDeg) = (axisDeg, frontLobeDeg, backLobeDeg);
-        (_rightRe, _rightIm, _leftRe, _leftIm) = (new double[n], new double[n], new double[n], new double[n]);
-        (_total, _right, _left, _quotient) = (new double[n], new double[n], new double[n], new double[n]);
+        (_rightRe, _rightIm, _leftRe, _leftIm) = (new double[_padded], new double[_padded], new double[_padded], new double[_padded]);
+        (_total, _right, _left, _quotient) = (new double[_padded], new double[_padded], new double[_padded], new double[n]);
         for (var i = 0; i < n; i++)
         {
             var power = first.Power(start + i) + second.Power(start + i);
@@ -69,6 +78,13 @@ internal sealed class CutTrial
             var random = new TrialRandom(0);
             Run(default, ref random);
             _rightIsCo = Values[(int)CutSlot.AxisRight] >= Values[(int)CutSlot.AxisLeft];
+        }
+
+        double[] Padded(double[]? plane)
+        {
+            var padded = new double[_padded];
+            plane?.AsSpan(start, n).CopyTo(padded);
+            return padded;
         }
     }
 
@@ -95,54 +111,67 @@ internal sealed class CutTrial
     private void Disturb(in CutErrors errors, ref TrialRandom random)
     {
         var n = _angleDeg.Length;
-        var common = Decibels.ToAmplitude(errors.LevelDb);
-        var (firstGain, secondGain) = (common * Decibels.ToAmplitude(0.5 * errors.BalanceDb), common * Decibels.ToAmplitude(-0.5 * errors.BalanceDb));
-        var (balanceSin, balanceCos) = Math.SinCos(double.DegreesToRadians(errors.BalancePhaseDeg));
-        var (stepSin, stepCos) = Math.SinCos(2.0 * Math.PI * errors.StrayTurns / n);
-        var driftStep = Decibels.ToAmplitude(errors.DriftDb / n);
-        var noise = errors.Noise * _peakAmplitude * InverseRootTwo;
-        var (strayRe, strayIm, drift) = (_peakAmplitude, 0.0, 1.0);
-        for (var i = 0; i < n; i++)
+        if (errors.Noise > 0.0)
         {
-            var (fr, fi, sr, si) = (_firstRe[i], _firstIm[i], _secondRe[i], _secondIm[i]);
-            var ar = fr + (errors.FirstLeak.Re * sr) - (errors.FirstLeak.Im * si);
-            var ai = fi + (errors.FirstLeak.Re * si) + (errors.FirstLeak.Im * sr);
-            var br = sr + (errors.SecondLeak.Re * fr) - (errors.SecondLeak.Im * fi);
-            var bi = si + (errors.SecondLeak.Re * fi) + (errors.SecondLeak.Im * fr);
-            ar += (errors.FirstStray.Re * strayRe) - (errors.FirstStray.Im * strayIm);
-            ai += (errors.FirstStray.Re * strayIm) + (errors.FirstStray.Im * strayRe);
-            br += (errors.SecondStray.Re * strayRe) - (errors.SecondStray.Im * strayIm);
-            bi += (errors.SecondStray.Re * strayIm) + (errors.SecondStray.Im * strayRe);
-            (strayRe, strayIm) = ((strayRe * stepCos) - (strayIm * stepSin), (strayRe * stepSin) + (strayIm * stepCos));
-            (ar, ai) = (((ar * balanceCos) - (ai * balanceSin)) * (firstGain * drift), ((ar * balanceSin) + (ai * balanceCos)) * (firstGain * drift));
-            (br, bi) = (br * (secondGain * drift), bi * (secondGain * drift));
-            drift *= driftStep;
-            if (noise > 0.0)
+            var noise = errors.Noise * _peakAmplitude * InverseRootTwo;
+            for (var i = 0; i < _noise.Length; i++)
             {
-                ar += noise * random.TableNormal();
-                ai += noise * random.TableNormal();
-                br += noise * random.TableNormal();
-                bi += noise * random.TableNormal();
+                _noise[i] = noise * random.TableNormal();
             }
-
-            if (!_isLinear)
-            {
-                (_rightRe[i], _rightIm[i], _leftRe[i], _leftIm[i]) = (ar, ai, br, bi);
-            }
-            else
-            {
-                (_rightRe[i], _rightIm[i]) = ((ar - bi) * InverseRootTwo, (ai + br) * InverseRootTwo);
-                (_leftRe[i], _leftIm[i]) = ((ar + bi) * InverseRootTwo, (ai - br) * InverseRootTwo);
-            }
-
-            _total[i] = 10.0 * Math.Log10((ar * ar) + (ai * ai) + (br * br) + (bi * bi));
-            (_right[i], _left[i]) = (LevelOf(_rightRe[i], _rightIm[i]), LevelOf(_leftRe[i], _leftIm[i]));
         }
+        else
+        {
+            Array.Clear(_noise);
+        }
+
+        var common = Decibels.ToAmplitude(errors.LevelDb);
+        var firstGain = common * Decibels.ToAmplitude(0.5 * errors.BalanceDb);
+        var secondGain = common * Decibels.ToAmplitude(-0.5 * errors.BalanceDb);
+        var (balanceSin, balanceCos) = Math.SinCos(double.DegreesToRadians(errors.BalancePhaseDeg));
+        var (turnRe, turnIm) = (firstGain * balanceCos, firstGain * balanceSin);
+        var (strayCos, straySin) = _stray.Of(errors.StrayTurns);
+
+        // A drift of a tenth of a decibel over a cut is a straight line to a part in ten thousand.
+        var driftStep = (Decibels.ToAmplitude(errors.DriftDb) - 1.0) / n;
+        var width = Vector<double>.Count;
+        for (var i = 0; i < _padded; i += width)
+        {
+            var (fr, fi) = (new Vector<double>(_firstRe, i), new Vector<double>(_firstIm, i));
+            var (sr, si) = (new Vector<double>(_secondRe, i), new Vector<double>(_secondIm, i));
+            var (rayRe, rayIm) = (new Vector<double>(strayCos, i) * _peakAmplitude, new Vector<double>(straySin, i) * _peakAmplitude);
+            var ar = fr + (sr * errors.FirstLeak.Re) - (si * errors.FirstLeak.Im) + (rayRe * errors.FirstStray.Re) - (rayIm * errors.FirstStray.Im);
+            var ai = fi + (si * errors.FirstLeak.Re) + (sr * errors.FirstLeak.Im) + (rayIm * errors.FirstStray.Re) + (rayRe * errors.FirstStray.Im);
+            var br = sr + (fr * errors.SecondLeak.Re) - (fi * errors.SecondLeak.Im) + (rayRe * errors.SecondStray.Re) - (rayIm * errors.SecondStray.Im);
+            var bi = si + (fi * errors.SecondLeak.Re) + (fr * errors.SecondLeak.Im) + (rayIm * errors.SecondStray.Re) + (rayRe * errors.SecondStray.Im);
+            var drift = Vector<double>.One + ((new Vector<double>(i) + Vector<double>.Indices) * driftStep);
+            (ar, ai) = (((ar * turnRe) - (ai * turnIm)) * drift, ((ar * turnIm) + (ai * turnRe)) * drift);
+            (br, bi) = (br * drift * secondGain, bi * drift * secondGain);
+            ar += new Vector<double>(_noise, i);
+            ai += new Vector<double>(_noise, _padded + i);
+            br += new Vector<double>(_noise, (2 * _padded) + i);
+            bi += new Vector<double>(_noise, (3 * _padded) + i);
+            ((ar * ar) + (ai * ai) + (br * br) + (bi * bi)).CopyTo(_total, i);
+
+            // R = (θ + jφ)/√2, L = (θ − jφ)/√2 where the ports are linear; else the ports are the hands.
+            var (rr, ri, lr, li) = _isLinear
+                ? ((ar - bi) * InverseRootTwo, (ai + br) * InverseRootTwo, (ar + bi) * InverseRootTwo, (ai - br) * InverseRootTwo)
+                : (ar, ai, br, bi);
+            rr.CopyTo(_rightRe, i);
+            ri.CopyTo(_rightIm, i);
+            lr.CopyTo(_leftRe, i);
+            li.CopyTo(_leftIm, i);
+            ((rr * rr) + (ri * ri)).CopyTo(_right, i);
+            ((lr * lr) + (li * li)).CopyTo(_left, i);
+        }
+
+        Decibels.OfPowers(_total, _total);
+        Decibels.OfPowers(_right, _right);
+        Decibels.OfPowers(_left, _left);
     }
 
     private void TakeBeam(double angleErrorDeg)
     {
-        if (_angleDeg.Length < BeamFigures.LeastAngles || !Beam.TryFind(_angleDeg, _total, out var beam))
+        if (_angleDeg.Length < BeamFigures.LeastAngles || !Beam.TryFind(_angleDeg, _total.AsSpan(0, _angleDeg.Length), out var beam))
         {
             return;
         }
@@ -155,8 +184,8 @@ internal sealed class CutTrial
         Set(CutSlot.BackLobe, Near(_backLobeDeg) - beam.PeakDb);
         if (HasEllipse)
         {
-            Set(CutSlot.RightWidth, Beam.TryFind(_angleDeg, _right, out var right) ? right.WidthDeg : double.NaN);
-            Set(CutSlot.LeftWidth, Beam.TryFind(_angleDeg, _left, out var left) ? left.WidthDeg : double.NaN);
+            Set(CutSlot.RightWidth, Beam.TryFind(_angleDeg, _right.AsSpan(0, _angleDeg.Length), out var right) ? right.WidthDeg : double.NaN);
+            Set(CutSlot.LeftWidth, Beam.TryFind(_angleDeg, _left.AsSpan(0, _angleDeg.Length), out var left) ? left.WidthDeg : double.NaN);
         }
 
         TakeDirection(BeamFigures.Inside(_angleDeg, beam.PeakDeg), CutSlot.PeakRight);
@@ -228,7 +257,7 @@ internal sealed class CutTrial
 
     private double At(double[] plane, int segment, double directionDeg) => plane.Length == 1 || _angleDeg[segment] == directionDeg
         ? plane[segment]
-        : LocalCubic.Interpolate(_angleDeg, plane, segment, directionDeg);
+        : LocalCubic.Interpolate(_angleDeg, plane.AsSpan(0, _angleDeg.Length), segment, directionDeg);
 
     private void Set(CutSlot slot, double value) => Values[(int)slot] = value;
 }

@@ -1,14 +1,15 @@
 using RangeReduce.Numerics;
 using RangeReduce.Patterns;
 using RangeReduce.Quantities;
+using RangeReduce.Reduction.Cuts;
 
 namespace RangeReduce.Uncertainties;
 
 /// <summary>The trials of one cut at one frequency, and what they say about its figures.</summary>
 internal sealed class CutUncertainty
 {
-    // One term at a time needs no tails, only a spread: it is known to a tenth after this many draws.
-    private const int DrawsPerTerm = 64;
+    // One term at a time needs no tails, only a spread: it is known to an eighth after this many draws.
+    private const int DrawsPerTerm = 32;
 
     private readonly double[] _values;
     private readonly double[][] _trials;
@@ -53,9 +54,13 @@ internal sealed class CutUncertainty
 
         var index = (int)slot;
         var budget = BudgetRules.StateOf(figure.Quantity, _errors.Given);
+
+        // The mean over several cuts differs from this cut's own value: the spread is laid about the figure's value.
+        var reading = ReadingOf(figure, index);
+        var shift = reading - _values[index];
         if (slot is not (CutSlot.AxisCrossOverCo or CutSlot.PeakCrossOverCo))
         {
-            var trials = _trials[index].ToArray();
+            var trials = Array.ConvertAll(_trials[index], value => value + shift);
             if (figure.Quantity == QuantityCatalogue.TiltAngle)
             {
                 // An axis has no ends: turn each trial by half turns to within 90 degrees of the value.
@@ -67,7 +72,7 @@ internal sealed class CutUncertainty
                 : null;
         }
 
-        return TrialResult.Quotient(_trials[index].ToArray(), _values[index]) is { } quotient ? OfQuotient(figure, index, quotient, budget) : null;
+        return TrialResult.Quotient(Array.ConvertAll(_trials[index], value => Math.Abs(value + shift)), reading) is { } quotient ? OfQuotient(figure, index, quotient, reading, budget) : null;
     }
 
     private static Uncertainty OfQuotientEnds(Figure figure, double low, double high, BudgetState budget, IReadOnlyList<UncertaintyShare> shares)
@@ -156,10 +161,27 @@ internal sealed class CutUncertainty
         };
     }
 
-    private Uncertainty OfQuotient(Figure figure, int index, (double Low, double High) quotient, BudgetState budget)
+    /// <summary>Gives the value of the figure as the trials count it: decibels and degrees as they are, ratios of polarization as cross over co.</summary>
+    private double ReadingOf(Figure figure, int index)
+    {
+        if (figure.Quantity == QuantityCatalogue.CrossPolarRatio)
+        {
+            return Decibels.ToAmplitude(-figure.Value);
+        }
+
+        if (figure.Quantity != QuantityCatalogue.AxialRatio)
+        {
+            return figure.Value;
+        }
+
+        // The axial ratio does not say which hand is the stronger; the trials do.
+        var quotient = AxialRatioBeamwidthFigure.CrossOverCo(figure.Value);
+        return _values[index] > 1.0 ? 1.0 / quotient : quotient;
+    }
+
+    private Uncertainty OfQuotient(Figure figure, int index, (double Low, double High) quotient, double q, BudgetState budget)
     {
         // What a small change of the quotient does to the figure in dB: 40/(ln 10 (1 − q²)) for the axial ratio, 20/(ln 10 q) for the cross-polar ratio.
-        var q = _values[index];
         var slope = figure.Quantity == QuantityCatalogue.AxialRatio ? 40.0 / (Math.Log(10.0) * Math.Abs(1.0 - (q * q))) : 20.0 / (Math.Log(10.0) * q);
         return OfQuotientEnds(figure, quotient.Low, quotient.High, budget, Shares(index, slope));
     }

@@ -14,7 +14,7 @@ internal static class RiceInterval
     public const double NormalFrom = 5.0;
 
     private const double Tail = 0.025;
-    private const double Step = 0.05;
+    private const double Step = 0.1;
 
     private static readonly Lazy<(double Low, double High)[]> Table = new(MakeTable);
 
@@ -35,7 +35,7 @@ internal static class RiceInterval
     public static double Cumulative(double reading, double trueLength)
     {
         // Simpson's rule over the density r exp(−(r − ν)²/2) · I0(rν) e^(−rν); it is smooth and short-tailed.
-        const int Intervals = 200;
+        const int Intervals = 100;
         var from = Math.Max(0.0, trueLength - 9.0);
         if (reading <= from)
         {
