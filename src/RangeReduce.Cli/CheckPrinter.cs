@@ -3,7 +3,6 @@ using RangeReduce.Patterns;
 using RangeReduce.Quantities;
 using RangeReduce.Runs;
 using RangeReduce.Runs.Description;
-using Spectre.Console;
 
 namespace RangeReduce.Cli;
 
@@ -19,9 +18,9 @@ internal static class CheckPrinter
         var output = terminal.Output;
         output.WriteLine($"{description.Information.Name}: {Count(description.Files.Count, "file")}, {Count(description.States.Count, "state")}, {(description.HasManifest ? "by run.toml" : "understood from names and content (no run.toml)")}");
         output.WriteLine();
-        PrintFiles(terminal, description);
+        PrintFiles(output, description);
         output.WriteLine();
-        PrintStates(terminal, description);
+        PrintStates(output, description);
         output.WriteLine();
         output.WriteLine("Conventions");
         foreach (var convention in description.Conventions)
@@ -48,36 +47,30 @@ internal static class CheckPrinter
         }
     }
 
-    private static void PrintFiles(Terminal terminal, RunDescription description)
+    private static void PrintFiles(TextWriter output, RunDescription description)
     {
-        var table = new Table().Border(TableBorder.Simple).AddColumns("file", "is", "state", "source", "holds", "because of");
+        var table = new PlainTable("file", "is", "state", "source", "because of", "holds");
         foreach (var file in description.Files)
         {
-            table.AddRow(
-                new Text(file.Input.Path),
-                new Text(KindWord(file)),
-                new Text(file.Input.State ?? string.Empty),
-                new Text(file.Input.Source?.Word() ?? string.Empty),
-                new Text(Holds(file)),
-                new Text(file.Input.Reason));
+            table.Add(file.Input.Path, KindWord(file), file.Input.State ?? "-", file.Input.Source?.Word() ?? "-", file.Input.Reason, Holds(file));
         }
 
-        terminal.OutputConsole().Write(table);
+        table.Write(output);
     }
 
-    private static void PrintStates(Terminal terminal, RunDescription description)
+    private static void PrintStates(TextWriter output, RunDescription description)
     {
-        var table = new Table().Border(TableBorder.Simple).AddColumns("state", "intended hand", "measured", "simulated");
+        var table = new PlainTable("state", "intended hand", "measured", "simulated");
         foreach (var state in description.States)
         {
-            table.AddRow(
-                new Text(state.State.Name),
-                new Text(state.State.KnownHand is { } known ? $"{known.Word()} (known)" : state.State.IntendedHand?.Word() ?? "not stated"),
-                new Text($"{Count(state.MeasuredSweeps, "sweep")}, {Count(state.MeasuredCuts, "cut")}"),
-                new Text($"{Count(state.SimulatedSweeps, "sweep")}, {Count(state.SimulatedCuts, "cut")}"));
+            table.Add(
+                state.State.Name,
+                state.State.KnownHand is { } known ? $"{known.Word()} (known)" : state.State.IntendedHand?.Word() ?? "not stated",
+                $"{Count(state.MeasuredSweeps, "sweep")}, {Count(state.MeasuredCuts, "cut")}",
+                $"{Count(state.SimulatedSweeps, "sweep")}, {Count(state.SimulatedCuts, "cut")}");
         }
 
-        terminal.OutputConsole().Write(table);
+        table.Write(output);
     }
 
     private static void PrintColumns(TextWriter output, RunDescription description)
@@ -130,10 +123,13 @@ internal static class CheckPrinter
     private static string Holds(CutDescription cut)
     {
         var along = cut.Axis == CutAxis.Theta ? "theta" : "phi";
-        var fixedAt = cut.FixedDeg is { } deg ? string.Create(CultureInfo.InvariantCulture, $"{(cut.Axis == CutAxis.Theta ? "phi" : "theta")} = {deg:0.##}, ") : string.Empty;
+        var fixedAt = cut.FixedDeg is { } deg ? string.Create(CultureInfo.InvariantCulture, $"{(cut.Axis == CutAxis.Theta ? "phi" : "theta")} = {deg:0.##} deg, ") : string.Empty;
         var frequencies = cut.LowHz is { } low && cut.HighHz is { } high ? $"{Count(cut.FrequencyCount, "frequency", "frequencies")} {Ghz(low)} to {Ghz(high)} GHz, " : string.Empty;
         var channels = string.Join(", ", cut.Channels.Select(channel => $"{channel.Channel} as {(channel.IsTurned ? "minus " : string.Empty)}{channel.Component.Word() ?? "nothing"}{(channel.HasPhase ? string.Empty : " (level only)")}"));
-        return string.Create(CultureInfo.InvariantCulture, $"{fixedAt}{along} {cut.LowDeg:0.##} to {cut.HighDeg:0.##} ({cut.AngleCount}), {frequencies}{channels}");
+        var angles = cut.AngleCount == 1
+            ? string.Create(CultureInfo.InvariantCulture, $"{along} {cut.LowDeg:0.##} deg")
+            : string.Create(CultureInfo.InvariantCulture, $"{along} {cut.LowDeg:0.##} to {cut.HighDeg:0.##} deg ({cut.AngleCount})");
+        return $"{fixedAt}{angles}, {frequencies}{channels}";
     }
 
     private static void PrintList(TextWriter output, string heading, IReadOnlyList<string> sentences)
