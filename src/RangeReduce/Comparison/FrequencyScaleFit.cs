@@ -45,15 +45,15 @@ public static class FrequencyScaleFit
 
         var misfit = new ScaleMisfit(simulatedHz, simulated, measuredHz, measured, options);
         var step = misfit.LogStep;
-        var lags = CoarseLags(misfit, options, step);
-        if (lags.Count == 0)
+        var lags = CoarseLags(misfit);
+        var minima = lags.Count == 0 ? [] : Refine(misfit, Starts(lags, step), step, options);
+        if (minima.Length == 0 || !double.IsFinite(minima[0].Rms))
         {
             reason = string.Create(CultureInfo.InvariantCulture, $"The curves share less than {100.0 * options.LeastCover:F0} % of the measured points at every factor that was allowed.");
             return false;
         }
 
-        var minima = Starts(lags, step).Select(lag => Refine(misfit, lag, step, options)).OrderBy(minimum => minimum.Rms).ToArray();
-        scale = Describe(misfit, minima, step, options);
+        scale = Describe(misfit, minima, step);
         return true;
     }
 
@@ -72,10 +72,10 @@ public static class FrequencyScaleFit
         return simulated.Max() > simulated.Min() && measured.Max() > measured.Min() ? null : "A curve is constant and has no feature to lay on the other.";
     }
 
-    private static List<CoarseLag> CoarseLags(ScaleMisfit misfit, FrequencyScaleOptions options, double step)
+    private static List<CoarseLag> CoarseLags(ScaleMisfit misfit)
     {
-        var reach = (int)Math.Floor(Math.Log(1.0 + options.LargestDeparture) / step);
-        return [.. Enumerable.Range(-reach, (2 * reach) + 1).Select(n => new CoarseLag(n * step, misfit.Rms(Math.Exp(n * step)), misfit.Correlation(Math.Exp(n * step)))).Where(lag => double.IsFinite(lag.Rms))];
+        var lags = Enumerable.Range(-misfit.Reach, (2 * misfit.Reach) + 1).Select(n => (Lag: n * misfit.LogStep, Shifted: misfit.Shifted(n)));
+        return [.. lags.Where(lag => double.IsFinite(lag.Shifted.Rms)).Select(lag => new CoarseLag(lag.Lag, lag.Shifted.Rms, lag.Shifted.Correlation))];
     }
 
     /// <summary>Takes the lag of the best correlation and the deepest local minima of the difference; noise makes many shallow ones.</summary>
@@ -86,17 +86,35 @@ public static class FrequencyScaleFit
         return minima.OrderBy(lag => lag.Rms).Select(lag => lag.Lag).Where(lag => Math.Abs(lag - best) > 2.0 * step).Take(RivalCount).Prepend(best);
     }
 
-    private static ScaleMinimum Refine(ScaleMisfit misfit, double lag, double step, FrequencyScaleOptions options)
+    /// <summary>Searches two steps to either side of each start and refines the minima that may still win.</summary>
+    private static ScaleMinimum[] Refine(ScaleMisfit misfit, IEnumerable<double> starts, double step, FrequencyScaleOptions options)
+    {
+        var limit = Math.Log(1.0 + options.LargestDeparture);
+        var scans = starts.Select(lag => Scan(misfit, Math.Max(lag - (2.0 * step), -limit), Math.Min(lag + (2.0 * step), limit))).ToArray();
+        var least = scans.Min(scan => scan.Rms);
+        return [.. scans.Select(scan => scan.Rms > 2.0 * least ? scan.Minimum : Polish(misfit, scan)).OrderBy(minimum => minimum.Rms)];
+    }
+
+    private static CoarseMinimum Scan(ScaleMisfit misfit, double low, double high)
     {
         const int Parts = 16;
-        var limit = Math.Log(1.0 + options.LargestDeparture);
-        var (low, high) = (Math.Max(lag - (2.0 * step), -limit), Math.Min(lag + (2.0 * step), limit));
         var places = Enumerable.Range(0, Parts + 1).Select(n => low + ((high - low) * n / Parts)).ToArray();
         var rms = Array.ConvertAll(places, place => misfit.Rms(Math.Exp(place)));
-        var least = Enumerable.Range(0, places.Length).Where(n => double.IsFinite(rms[n])).MinBy(n => rms[n]);
+        var least = Enumerable.Range(0, places.Length).Where(n => double.IsFinite(rms[n])).DefaultIfEmpty(0).MinBy(n => rms[n]);
         var atEnd = least is 0 or Parts || !double.IsFinite(rms[least - 1]) || !double.IsFinite(rms[least + 1]);
-        var place = atEnd ? places[least] : GoldenSection(x => misfit.Rms(Math.Exp(x)), places[least - 1], places[least + 1]);
-        return new ScaleMinimum(Math.Exp(place), misfit.Rms(Math.Exp(place)), atEnd);
+        var value = double.IsFinite(rms[least]) ? rms[least] : double.PositiveInfinity;
+        return new CoarseMinimum(places[least], value, atEnd, atEnd ? places[least] : places[least - 1], atEnd ? places[least] : places[least + 1]);
+    }
+
+    private static ScaleMinimum Polish(ScaleMisfit misfit, CoarseMinimum scan)
+    {
+        if (scan.AtEnd)
+        {
+            return scan.Minimum;
+        }
+
+        var factor = Math.Exp(GoldenSection(place => misfit.Rms(Math.Exp(place)), scan.Low, scan.High));
+        return new ScaleMinimum(factor, misfit.Rms(factor), AtEnd: false);
     }
 
     private static double GoldenSection(Func<double, double> function, double low, double high)
@@ -123,7 +141,7 @@ public static class FrequencyScaleFit
         return 0.5 * (low + high);
     }
 
-    private static FrequencyScale Describe(ScaleMisfit misfit, ScaleMinimum[] minima, double step, FrequencyScaleOptions options)
+    private static FrequencyScale Describe(ScaleMisfit misfit, ScaleMinimum[] minima, double step)
     {
         var best = minima[0];
         var remarks = new List<Remark>();
@@ -159,6 +177,11 @@ public static class FrequencyScaleFit
     }
 
     private sealed record CoarseLag(double Lag, double Rms, double Correlation);
+
+    private sealed record CoarseMinimum(double Place, double Rms, bool AtEnd, double Low, double High)
+    {
+        internal ScaleMinimum Minimum => new(Math.Exp(Place), Rms, AtEnd);
+    }
 
     private sealed record ScaleMinimum(double Factor, double Rms, bool AtEnd);
 }

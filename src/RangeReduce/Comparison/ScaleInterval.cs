@@ -8,8 +8,8 @@ internal static class ScaleInterval
     /// <summary>Gives half the 95 % interval and the number of independent points that the residuals amount to; NaN where the curve is flat.</summary>
     /// <remarks>Linearized least squares (JCGM 100, 5.1.2): variance of the factor = residual variance / sum of squared sensitivities. What simulation
     /// leaves over is smooth along frequency, so the variance is multiplied by the count over the effective count, n / (1 + 2 sum of the autocorrelation
-    /// up to its first sign change), and the quantile is Student's with the effective count less one. For a curve whose slope changes sign within that length the interval comes out too wide,
-    /// never too narrow.</remarks>
+    /// up to its first sign change), and the quantile is Student's with the effective count less one. For a curve whose slope changes sign within that length the interval comes out rather
+    /// too wide than too narrow.</remarks>
     internal static (double HalfWidth, double EffectiveCount) HalfWidth(ScaleMisfit misfit, double factor)
     {
         var points = misfit.Residuals(factor);

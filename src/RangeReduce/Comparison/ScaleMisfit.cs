@@ -11,6 +11,7 @@ internal sealed class ScaleMisfit
     private readonly double[] _measured;
     private readonly double[] _logAxis;
     private readonly double[] _measuredOnLogAxis;
+    private readonly double[] _simulatedOnLogAxis;
     private readonly double _leastCover;
     private readonly IInterpolation _simulated;
 
@@ -24,7 +25,12 @@ internal sealed class ScaleMisfit
         var onAxis = Array.ConvertAll(_logAxis, Math.Exp);
         (onAxis[0], onAxis[^1]) = (measuredHz[0], measuredHz[^1]);
         _measuredOnLogAxis = SampledCurve.Interpolate(measuredHz, measured, onAxis);
+        Reach = (int)Math.Floor(Math.Log(1.0 + options.LargestDeparture) / LogStep);
+        _simulatedOnLogAxis = [.. Enumerable.Range(-Reach, _logAxis.Length + (2 * Reach)).Select(n => OnLogAxis(_logAxis[0] + (n * LogStep)))];
     }
+
+    /// <summary>Gets the largest shift, in whole points of the logarithmic axis, that the options allow.</summary>
+    internal int Reach { get; }
 
     internal double LogStep => _logAxis[1] - _logAxis[0];
 
@@ -53,26 +59,40 @@ internal sealed class ScaleMisfit
             : double.NaN;
     }
 
-    /// <summary>Gives the correlation of the mean-free curves on the logarithmic axis; negative infinity where one of them is constant there.</summary>
-    internal double Correlation(double factor)
+    /// <summary>Compares the curves on the logarithmic axis, where the factor exp(lag * <see cref="LogStep"/>) is a shift by whole points.</summary>
+    /// <returns>The root mean square difference, NaN where the curves share too few points, and the correlation of the mean-free curves, negative
+    /// infinity where one of them is constant there.</returns>
+    internal (double Rms, double Correlation) Shifted(int lag)
     {
-        var (count, a, b, aa, bb, ab) = (0, 0.0, 0.0, 0.0, 0.0, 0.0);
+        var (count, squares, a, b, aa, bb, ab) = (0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0);
         for (var n = 0; n < _logAxis.Length; n++)
         {
-            var at = Math.Exp(_logAxis[n]) / factor;
-            if (at < _simulatedLow || at > _simulatedHigh)
+            var (m, s) = (_measuredOnLogAxis[n], _simulatedOnLogAxis[n - lag + Reach]);
+            if (double.IsNaN(s))
             {
                 continue;
             }
 
-            var (m, s) = (_measuredOnLogAxis[n], _simulated.Interpolate(at));
-            (count, a, b, aa, bb, ab) = (count + 1, a + m, b + s, aa + (m * m), bb + (s * s), ab + (m * s));
+            (count, squares) = (count + 1, squares + ((m - s) * (m - s)));
+            (a, b, aa, bb, ab) = (a + m, b + s, aa + (m * m), bb + (s * s), ab + (m * s));
+        }
+
+        if (count == 0 || count < _leastCover * _logAxis.Length)
+        {
+            return (double.NaN, double.NegativeInfinity);
         }
 
         var spread = ((count * aa) - (a * a)) * ((count * bb) - (b * b));
-        return spread > 0.0 ? ((count * ab) - (a * b)) / Math.Sqrt(spread) : double.NegativeInfinity;
+        return (Math.Sqrt(squares / count), spread > 0.0 ? ((count * ab) - (a * b)) / Math.Sqrt(spread) : double.NegativeInfinity);
     }
 
     /// <summary>Gives the derivative of the scaled simulated curve by the factor, in the unit of the curves.</summary>
     internal double Sensitivity(double hz, double factor) => -_simulated.Differentiate(hz / factor) * hz / (factor * factor);
+
+    private double OnLogAxis(double logHz)
+    {
+        // The ends of equal axes must not be lost to the rounding of the logarithm.
+        var hz = Math.Exp(logHz);
+        return hz < _simulatedLow * (1.0 - 1e-12) || hz > _simulatedHigh * (1.0 + 1e-12) ? double.NaN : _simulated.Interpolate(Math.Clamp(hz, _simulatedLow, _simulatedHigh));
+    }
 }
