@@ -131,6 +131,19 @@ public sealed class SweepIdentifierTests
     }
 
     [Fact]
+    public void A_logarithmic_axis_gives_the_answer_and_the_delay_of_a_uniform_one()
+    {
+        var antenna = new SyntheticAntenna(14);
+        var identifier = Build(antenna.Run(4, 0.003));
+        double[] axis = [.. Enumerable.Range(0, 350).Select(n => 1.2e9 * Math.Pow(2.2 / 1.2, n / 349.0))];
+        var sweep = antenna.Sweep("left", 0.003, axis, cableSeconds: 0.0);
+        var (plain, cabled) = (identifier.Identify(sweep), identifier.Identify(WithCable(sweep, -4.1e-9)));
+        Assert.Equal("left", cabled.State);
+        Assert.Equal(-4.1e-9, cabled.DelaySeconds - plain.DelaySeconds, 1e-12);
+        Assert.Equal(plain.RmsDistance, cabled.RmsDistance, 1e-8);
+    }
+
+    [Fact]
     public void Too_small_an_overlap_another_impedance_and_a_gap_are_refused_with_a_reason()
     {
         var antenna = new SyntheticAntenna(6);
