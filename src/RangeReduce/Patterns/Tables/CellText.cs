@@ -65,6 +65,11 @@ internal static class CellText
 
         Span<byte> lower = stackalloc byte[12];
         _ = Ascii.ToLower(text, lower, out var length);
+        if (length < text.Length)
+        {
+            return false;
+        }
+
         var word = lower[..length];
         if (word[0] is (byte)'+' or (byte)'-')
         {

@@ -56,11 +56,15 @@ internal sealed class CutAssembler
     /// <summary>Finds the grid of each cut and which cells are filled.</summary>
     private void Mark()
     {
-        EachReading((grid, _, _, frequency, angle) =>
+        var across = _acrossSlot < 0 ? [0] : _acrossIndex.Distinct().ToArray();
+        foreach (var run in _store.Runs)
         {
-            grid.HasFrequency[frequency] = true;
-            grid.HasAngle[angle] = true;
-        });
+            foreach (var one in across)
+            {
+                MarkKeys(run, one);
+            }
+        }
+
         var cells = 0L;
         foreach (var grid in _grids)
         {
@@ -74,39 +78,40 @@ internal sealed class CutAssembler
             grid.Open();
         }
 
-        EachReading((grid, row, across, frequency, angle) => grid.Fill(grid.Cell(frequency, angle), row, across));
+        var row = 0;
         foreach (var run in _store.Runs)
         {
-            foreach (var across in Across())
+            foreach (var one in across)
             {
-                for (var at = 0; at < run.Count; at += Math.Max(1, run.Count - 1))
-                {
-                    _grids[CutAt(run, at, across)].Take(run);
-                }
+                MarkCells(run, row, one);
             }
+
+            row += run.Count;
+        }
+    }
+
+    private void MarkKeys(in SampleRun run, int across)
+    {
+        for (var at = 0; at < run.Count; at++)
+        {
+            var grid = _grids[CutAt(run, at, across)];
+            grid.HasFrequency[Index(run, at, TableKey.Frequency, across)] = true;
+            grid.HasAngle[Index(run, at, _frame.MovingSlot, across)] = true;
+            grid.Take(run.Line + at);
+        }
+    }
+
+    private void MarkCells(in SampleRun run, int row, int across)
+    {
+        for (var at = 0; at < run.Count; at++)
+        {
+            var grid = _grids[CutAt(run, at, across)];
+            grid.Fill(grid.Cell(Index(run, at, TableKey.Frequency, across), Index(run, at, _frame.MovingSlot, across)), row + at, across);
         }
     }
 
     private int CutAt(in SampleRun run, int at, int across) =>
         _cutOf[_acrossSlot == _frame.FixedSlot ? across : run.Start(_frame.FixedSlot) + (at * run.Step(_frame.FixedSlot))];
-
-    private IEnumerable<int> Across() => _acrossSlot < 0 ? [0] : _acrossIndex.Distinct();
-
-    private void EachReading(Action<CutGrid, int, int, int, int> visit)
-    {
-        int[] acrossAll = [.. Across()];
-        var row = 0;
-        foreach (var run in _store.Runs)
-        {
-            for (var at = 0; at < run.Count; at++, row++)
-            {
-                foreach (var across in acrossAll)
-                {
-                    visit(_grids[CutAt(run, at, across)], row, across, Index(run, at, TableKey.Frequency, across), Index(run, at, _frame.MovingSlot, across));
-                }
-            }
-        }
-    }
 
     private int Index(in SampleRun run, int at, int slot, int across) => _acrossSlot == slot ? across : run.Start(slot) + (at * run.Step(slot));
 

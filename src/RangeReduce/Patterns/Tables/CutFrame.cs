@@ -13,7 +13,25 @@ internal sealed record CutFrame(CutAxis Axis, int MovingSlot, double[] MovingDeg
     public int FixedSlot => MovingSlot == TableKey.First ? TableKey.Second : TableKey.First;
 
     /// <summary>Decides from the angles that occur.</summary>
+    /// <exception cref="Diagnostics.MeasurementDataException">Some rows have an angle or a frequency and some have none.</exception>
     public static CutFrame Choose(TableContext context, TablePlan plan, SampleStore store)
+    {
+        var frame = Chosen(context, plan, store);
+        if (store.Keys[TableKey.Frequency].Values is { Count: > 1 } frequencies && frequencies.Exists(double.IsNaN))
+        {
+            throw TableFaults.HalfKey(context.HeadingsPlace, "frequency");
+        }
+
+        if (!Array.Exists(frame.MovingDeg, double.IsNaN))
+        {
+            return frame;
+        }
+
+        context.Note("single-angle", "The table gives no angle along the cut: its samples were taken as a cut with the single angle 0 degrees.");
+        return frame.MovingDeg.Length == 1 ? frame with { MovingDeg = [0.0] } : throw TableFaults.HalfKey(context.HeadingsPlace, "angle");
+    }
+
+    private static CutFrame Chosen(TableContext context, TablePlan plan, SampleStore store)
     {
         var first = store.Keys[TableKey.First].Values;
         var second = store.Keys[TableKey.Second].Values;
@@ -21,12 +39,6 @@ internal sealed record CutFrame(CutAxis Axis, int MovingSlot, double[] MovingDeg
         if (firstKind == HeadingKind.Azimuth && secondKind == HeadingKind.Elevation)
         {
             return ElevationOverAzimuth(context, first, second);
-        }
-
-        if (firstKind == HeadingKind.Unknown && secondKind == HeadingKind.Unknown)
-        {
-            context.Note("single-angle", "The table gives no angle: its samples were taken as a cut with the single angle 0 degrees.");
-            return new(CutAxis.Theta, TableKey.First, [0.0], [double.NaN]);
         }
 
         // A positioner's azimuth or elevation that moves alone is theta; only the frame of the run can tell more.

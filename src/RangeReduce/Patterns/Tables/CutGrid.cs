@@ -38,8 +38,8 @@ internal sealed class CutGrid
     /// <summary>Gets the number of cells.</summary>
     public long CellCount => (long)FrequencyHz.Length * AngleDeg.Length;
 
-    /// <summary>Takes the lines of a run in.</summary>
-    public void Take(SampleRun run) => Lines = (Math.Min(Lines.First, run.Line), Math.Max(Lines.Last, run.Line + run.Count - 1));
+    /// <summary>Takes the line of a row in.</summary>
+    public void Take(int line) => Lines = (Math.Min(Lines.First, line), Math.Max(Lines.Last, line));
 
     /// <summary>Sorts the axes once all keys are marked.</summary>
     /// <param name="frequencyHz">The frequency of each index.</param>

@@ -25,18 +25,15 @@ internal static class HeadingResolver
         return headings;
     }
 
+    /// <summary>Finds the meaning that was laid down for a heading or for the number of its column; null where none was.</summary>
+    public static string? LaidDownMeaning(IReadOnlyDictionary<string, string> columns, string text, int at) =>
+        columns.Count == 0 ? null
+        : columns.FirstOrDefault(entry => string.Equals(entry.Key.Trim(), HeadingParser.Plain(text), StringComparison.OrdinalIgnoreCase) || string.Equals(entry.Key.Trim(), text, StringComparison.OrdinalIgnoreCase)).Value
+            ?? columns.GetValueOrDefault((at + 1).ToString(CultureInfo.InvariantCulture));
+
     private static Heading? LaidDown(TableContext context, string text, int at)
     {
-        var columns = context.Options.Columns;
-        if (columns.Count == 0)
-        {
-            return null;
-        }
-
-        var number = (at + 1).ToString(CultureInfo.InvariantCulture);
-        var meaning = columns.FirstOrDefault(entry => string.Equals(entry.Key.Trim(), HeadingParser.Plain(text), StringComparison.OrdinalIgnoreCase) || string.Equals(entry.Key.Trim(), text, StringComparison.OrdinalIgnoreCase)).Value
-            ?? columns.GetValueOrDefault(number);
-        if (meaning is null)
+        if (LaidDownMeaning(context.Options.Columns, text, at) is not { } meaning)
         {
             return null;
         }
@@ -53,39 +50,45 @@ internal static class HeadingResolver
             heading = HeadingParser.Parse($"{meaning} [{original.Unit.Text}]");
         }
 
-        return heading.IsKnown ? heading with { Text = text.Length > 0 ? text : $"column {number}" } : throw TableFaults.Meaning(context.HeadingPlace(at), text, meaning);
+        return heading.IsKnown ? heading with { Text = text.Length > 0 ? text : string.Create(CultureInfo.InvariantCulture, $"column {at + 1}") } : throw TableFaults.Meaning(context.HeadingPlace(at), text, meaning);
     }
 
     /// <summary>Takes the corner of a wide table apart: <c>Theta [deg] \ Frequency [MHz]</c>.</summary>
-    private static void Corner(Heading[] headings)
+    /// <returns>False where the text names no pair of an angle and the frequency.</returns>
+    public static bool TryCorner(string text, out Heading down, out Heading across)
     {
-        var corner = headings[0];
-        if (corner.Kind != HeadingKind.Unknown || !Array.Exists(headings, heading => heading.IsAcross))
-        {
-            return;
-        }
-
         foreach (var sign in (ReadOnlySpan<char>)['\\', '/', '|'])
         {
-            var at = corner.Text.IndexOf(sign, StringComparison.Ordinal);
+            var at = text.IndexOf(sign, StringComparison.Ordinal);
             if (at <= 0)
             {
                 continue;
             }
 
-            var (down, across) = (HeadingParser.Parse(corner.Text[..at]), HeadingParser.Parse(corner.Text[(at + 1)..]));
+            (down, across) = (HeadingParser.Parse(text[..at]), HeadingParser.Parse(text[(at + 1)..]));
             if ((down.IsAngle && across.Kind == HeadingKind.Frequency) || (down.Kind == HeadingKind.Frequency && across.IsAngle))
             {
-                headings[0] = down with { Text = corner.Text };
-                for (var column = 1; column < headings.Length; column++)
-                {
-                    if (headings[column] is { IsAcross: true, AcrossKind: HeadingKind.Unknown } bare)
-                    {
-                        headings[column] = bare with { AcrossKind = across.Kind, AcrossUnit = across.Unit };
-                    }
-                }
+                return true;
+            }
+        }
 
-                return;
+        down = across = new() { Text = text };
+        return false;
+    }
+
+    private static void Corner(Heading[] headings)
+    {
+        if (headings[0].Kind != HeadingKind.Unknown || !Array.Exists(headings, heading => heading.IsAcross) || !TryCorner(headings[0].Text, out var down, out var across))
+        {
+            return;
+        }
+
+        headings[0] = down with { Text = headings[0].Text };
+        for (var column = 1; column < headings.Length; column++)
+        {
+            if (headings[column] is { IsAcross: true, AcrossKind: HeadingKind.Unknown } bare)
+            {
+                headings[column] = bare with { AcrossKind = across.Kind, AcrossUnit = across.Unit };
             }
         }
     }

@@ -34,8 +34,16 @@ internal readonly record struct HeadingUnit(UnitKind Kind, double Factor, string
     }
 
     /// <summary>Finds a unit that cannot be mistaken for a name, so that it may stand in a heading without brackets: <c>RHCP dB</c>, but not <c>S21 V</c>.</summary>
-    public static bool TryParseBare(ReadOnlySpan<char> text, out HeadingUnit unit) =>
-        TryParse(text, out unit) && (unit.Kind is UnitKind.Frequency or UnitKind.Angle || unit.IsDecibel);
+    public static bool TryParseBare(ReadOnlySpan<char> text, out HeadingUnit unit)
+    {
+        if (TryParse(text, out unit) && (unit.Kind is UnitKind.Frequency or UnitKind.Angle || unit.IsDecibel))
+        {
+            return true;
+        }
+
+        unit = None;
+        return false;
+    }
 
     private static string Normal(ReadOnlySpan<char> text) =>
         new string(text.Trim()).ToLowerInvariant().Replace('\u00B5', 'u').Replace('\u03BC', 'u').Replace("\u00B0", "deg", StringComparison.Ordinal);

@@ -12,6 +12,7 @@ internal sealed class RowReader
     private readonly RowSource _rows;
     private readonly KeyReader?[] _keys = new KeyReader?[3];
     private readonly int[] _fixed = new int[3];
+    private readonly int[] _columns;
     private readonly double[] _low;
     private readonly double[] _high;
     private readonly double[] _sample;
@@ -27,6 +28,7 @@ internal sealed class RowReader
         _decimal = (byte)context.Head.Dialect.Decimal;
         _missing = new(context, plan.Values);
         _sample = new double[plan.Values.Count];
+        _columns = [.. plan.Values.Select(value => value.Column)];
         (_low, _high) = (new double[plan.Values.Count], new double[plan.Values.Count]);
         for (var at = 0; at < plan.Values.Count; at++)
         {
@@ -53,8 +55,8 @@ internal sealed class RowReader
     public void ReadAll()
     {
         var expected = _context.Head.FieldCount;
-        var values = _plan.Values;
-        var most = Math.Min(_context.Options.MaxSamples / Math.Max(1, values.Count), int.MaxValue - 1);
+        var most = Math.Min(_context.Options.MaxSamples / Math.Max(1, _columns.Length), int.MaxValue - 1);
+        var (store, columns, sample) = (_store, _store.Columns, _sample);
         while (_rows.Read())
         {
             if ((_rows.Count != expected && !IsRow(expected)) || !Keys(out var keys) || !Samples())
@@ -62,17 +64,17 @@ internal sealed class RowReader
                 continue;
             }
 
-            if (_store.Rows >= most)
+            if (store.Rows >= most)
             {
                 throw TableFaults.TooManySamples(new(_context.File, _rows.Line), _context.Options.MaxSamples);
             }
 
-            for (var at = 0; at < _sample.Length; at++)
+            for (var at = 0; at < columns.Length; at++)
             {
-                _store.Columns[at].Add(_sample[at]);
+                columns[at].Add(sample[at]);
             }
 
-            _store.AddRow(_rows.Line, keys.Frequency, keys.First, keys.Second);
+            store.AddRow(_rows.Line, keys.Frequency, keys.First, keys.Second);
         }
 
         _missing.Finish(_store);
@@ -113,22 +115,22 @@ internal sealed class RowReader
 
     private bool Samples()
     {
-        var values = _plan.Values;
-        for (var at = 0; at < _sample.Length; at++)
+        var (rows, columns, low, high, sample, sign) = (_rows, _columns, _low, _high, _sample, _decimal);
+        for (var at = 0; at < columns.Length; at++)
         {
-            var column = values[at].Column;
-            var cell = _rows.Field(column);
-            if (!CellText.TryNumber(cell, _decimal, out var value) && !TrySlowly(cell, column, out value))
+            var column = columns[at];
+            var cell = rows.Field(column);
+            if (!CellText.TryNumber(cell, sign, out var value) && !TrySlowly(cell, column, out value))
             {
                 return false;
             }
 
-            if (!(value > _low[at] && value < _high[at]))
+            if (!(value > low[at] && value < high[at]))
             {
                 value = SecondLook(at, column, value, cell);
             }
 
-            _sample[at] = value;
+            sample[at] = value;
         }
 
         return true;

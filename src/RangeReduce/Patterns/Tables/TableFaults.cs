@@ -101,6 +101,9 @@ internal static class TableFaults
     public static MeasurementDataException BlockValue(SourcePlace place, string content, HeadingKind kind) =>
         new(place, "bad-block-value", Shown(content), kind == HeadingKind.Frequency ? "a frequency with its unit" : "an angle", "Correct the comment: it sets the value for the rows below it.");
 
+    public static MeasurementDataException HalfKey(SourcePlace place, string what) =>
+        new(place, "missing-key", $"rows with and rows without {(what[0] == 'a' ? "an" : "a")} {what}", $"a line \"{(what[0] == 'a' ? "phi: 45" : "frequency: 1.62 GHz")}\" over the first block too", "Add the missing line.");
+
     public static MeasurementDataException Sparse(SourcePlace place, int rows, int cuts, int frequencies, int angles) =>
         new(place, "no-grid", Invariant($"{rows} rows over {cuts} cuts, {frequencies} frequencies and {angles} angles that form no grid"), "the same frequencies at the same angles, with few gaps", "Check which column holds the angle and which the samples, or split the table.");
 

@@ -9,10 +9,11 @@ internal static class TableHeadFinder
 
     /// <summary>Looks through the head of a file.</summary>
     /// <returns>Null where nothing looks like rows of numbers under a line of headings; <paramref name="bare"/> then tells of rows without headings.</returns>
-    public static TableHead? Find(ReadOnlySpan<byte> bytes, bool isWhole, bool headingsNeeded, out (HeadLine Line, int Fields)? bare)
+    public static TableHead? Find(ReadOnlySpan<byte> bytes, bool isWhole, IReadOnlyDictionary<string, string> laidDown, out (HeadLine Line, int Fields)? bare)
     {
         var lines = HeadLine.Split(bytes, isWhole);
         bare = null;
+        var samples = new HashSet<int>();
         for (var at = 0; at < lines.Count; at++)
         {
             if (lines[at].IsComment || string.IsNullOrWhiteSpace(lines[at].Text) || Probe(lines[at].Text) is not { } probe)
@@ -20,18 +21,19 @@ internal static class TableHeadFinder
                 continue;
             }
 
+            samples.Add(at);
             var dialect = new Dialect(probe.Separator, DecimalSign(lines, at, probe.Separator));
-            var heading = HeadingOver(lines, at, dialect, probe.Fields);
+            var heading = HeadingOver(lines, samples, laidDown, dialect, probe.Fields);
 
             // A separator at the end of each row makes an empty last field without a heading.
-            heading ??= probe.EndsEmpty ? HeadingOver(lines, at, dialect, probe.Fields - 1) : null;
+            heading ??= probe.EndsEmpty ? HeadingOver(lines, samples, laidDown, dialect, probe.Fields - 1) : null;
             if (heading is { } found)
             {
                 return Make(lines, at, dialect, found.Texts.Count, found);
             }
 
             bare ??= probe.AllNumbers ? (lines[at], probe.Fields) : null;
-            if (!headingsNeeded && bare is { } first)
+            if (laidDown.Count > 0 && bare is { } first)
             {
                 return Make(lines, at, dialect, first.Fields, (-1, -1, [], []));
             }
@@ -57,7 +59,7 @@ internal static class TableHeadFinder
 
             // Texts between the numbers are spare columns, unless they are headings of the wide form.
             var all = numbers + missing == filled;
-            if (!all && fields.Exists(field => !IsNumber(field.Text, separator) && field.Text.Exists(char.IsLetter) && HeadingParser.Parse(field.Text).IsKnown))
+            if (!all && fields.Exists(field => !IsNumber(field.Text, separator) && field.Text.Exists(char.IsLetter) && (HeadingParser.Parse(field.Text).IsKnown || HeadingResolver.TryCorner(field.Text, out _, out _))))
             {
                 continue;
             }
@@ -100,14 +102,15 @@ internal static class TableHeadFinder
     }
 
     /// <summary>Finds the nearest line over the samples that reads as headings of the right number.</summary>
-    private static (int Names, int Units, List<string> Texts, List<int> Columns)? HeadingOver(List<HeadLine> lines, int data, Dialect dialect, int count)
+    private static (int Names, int Units, List<string> Texts, List<int> Columns)? HeadingOver(List<HeadLine> lines, HashSet<int> samples, IReadOnlyDictionary<string, string> laidDown, Dialect dialect, int count)
     {
+        var data = samples.Max();
         var units = -1;
         List<string>? unitTexts = null;
         for (var at = data - 1; at >= 0 && at >= data - 12; at--)
         {
             var line = lines[at];
-            if (string.IsNullOrWhiteSpace(line.Content) || HeadingSplitter.Split(line, dialect, count) is not { } fields)
+            if (samples.Contains(at) || string.IsNullOrWhiteSpace(line.Content) || HeadingSplitter.Split(line, dialect, count) is not { } fields)
             {
                 continue;
             }
@@ -124,7 +127,7 @@ internal static class TableHeadFinder
                 texts = WithUnits(texts, unitTexts);
             }
 
-            var known = texts.Count(text => HeadingParser.Parse(text).IsKnown);
+            var known = texts.Where((text, column) => HeadingParser.Parse(text).IsKnown || (column == 0 && HeadingResolver.TryCorner(text, out _, out _)) || HeadingResolver.LaidDownMeaning(laidDown, text, column) is not null).Count();
             var words = texts.Exists(text => text.Exists(char.IsLetter));
             if (words && known >= 1 && 2 * known >= texts.Count(text => text.Length > 0))
             {

@@ -17,6 +17,11 @@ internal static class TablePlanner
 
         var hasAngle = Array.Exists(headings, heading => heading.IsAngle || heading is { IsAcross: true, AcrossKind: not HeadingKind.Frequency });
         var isSweep = !hasAngle && Array.Exists(headings, heading => heading.Kind == HeadingKind.Reflection) && Array.Exists(headings, heading => heading.Kind == HeadingKind.Frequency);
+        if (isSweep)
+        {
+            NamelessParts(headings);
+        }
+
         var keys = KeyPlanner.Plan(context, headings);
         var values = ValuePlanner.Plan(context, headings, keys, isSweep ? HeadingKind.Reflection : HeadingKind.Channel);
         if (values.Count == 0)
@@ -40,6 +45,18 @@ internal static class TablePlanner
         var meanings = headings.Select((heading, at) => Meaning(heading, at, keys, values)).ToArray();
         NoteSpare(context, headings, keys, values);
         return new() { Content = content, Keys = keys, Values = values, Headings = headings, Meanings = meanings, Reference = ReferenceOf(context, values, content) };
+    }
+
+    /// <summary>Gives "Phase [deg]" beside "Return loss [dB]" to the reflection that stands before it.</summary>
+    private static void NamelessParts(Heading[] headings)
+    {
+        for (var at = 1; at < headings.Length; at++)
+        {
+            if (headings[at] is { Kind: HeadingKind.Channel, Channel: "" } && headings[at - 1].Kind == HeadingKind.Reflection)
+            {
+                headings[at] = headings[at] with { Kind = HeadingKind.Reflection, Channel = headings[at - 1].Channel };
+            }
+        }
     }
 
     /// <summary>Calls the only channel <c>spinning</c> where the heading or the preamble tells of a spinning linear probe.</summary>

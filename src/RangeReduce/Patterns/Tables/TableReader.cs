@@ -48,7 +48,7 @@ public static class TableReader
         options ??= new();
         var remarks = new List<Remark>();
         var input = TableInput.Open(stream, displayPath, remarks);
-        var head = TableHeadFinder.Find(input.Head, input.IsWhole, options.Columns.Count == 0, out var bare)
+        var head = TableHeadFinder.Find(input.Head, input.IsWhole, options.Columns, out var bare)
             ?? throw (input.Head.IsEmpty ? TableFaults.Empty(displayPath) : bare is { } found ? TableFaults.NoHeadings(new(displayPath, found.Line.Number), found.Fields) : TableFaults.NoTable(displayPath));
         var context = new TableContext(displayPath, head, options, remarks);
         var plan = TablePlanner.Plan(context);
@@ -68,4 +68,9 @@ public static class TableReader
             Remarks = remarks,
         };
     }
+
+    /// <summary>Gives whether the first bytes of a file look like a table: rows of numbers, with headings or without, and no Touchstone file.</summary>
+    /// <param name="head">The first bytes; a few kilobytes will do.</param>
+    /// <returns>True also for a table whose headings are not understood, so that reading it can say why.</returns>
+    public static bool LooksLikeTable(ReadOnlySpan<byte> head) => TableSniffer.LooksLikeTable(head);
 }
