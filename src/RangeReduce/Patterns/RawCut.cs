@@ -23,4 +23,7 @@ public sealed record RawCut
 
     /// <summary>Gets the first and last line of the samples in the file.</summary>
     public (int First, int Last) Lines { get; init; }
+
+    /// <summary>Gets the readings beyond the first at a frequency and angle, for repeatability; null where there are none.</summary>
+    public RepeatedReadings? Repeats { get; init; }
 }
