@@ -19,7 +19,7 @@ public static class ManifestDraft
         Lists(draft, ("tags", run.Information.Tags));
         Conventions(draft, run, manifest);
         var axis = UnitText.Write(run.AxisDeg, UnitDimension.Angle);
-        Table(draft, "[antenna]", ("axis", axis), ("largest-dimension", run.LargestDimensionM is { } size ? UnitText.Write(size, UnitDimension.Length) : null));
+        Table(draft, "[antenna]" + Assumed(manifest?.AxisDeg is null ? "assumed" : string.Empty), ("axis", axis), ("largest-dimension", run.LargestDimensionM is { } size ? UnitText.Write(size, UnitDimension.Length) : null));
         if (run.RangeLengthM is { } length)
         {
             Table(draft, "[range]", ("length", UnitText.Write(length, UnitDimension.Length)));
