@@ -11,6 +11,9 @@ namespace RangeReduce.Reduction;
 /// <param name="SpanDb">Largest less smallest level of the cut in dB.</param>
 public readonly record struct Beam(double PeakDeg, double PeakDb, double LowDeg, double HighDeg, double BackDb, double SpanDb)
 {
+    /// <summary>Gets whether samples on both sides of the highest one are there; if not, the true maximum may lie beyond the data or in a gap.</summary>
+    public bool IsPeakSeen { get; init; }
+
     /// <summary>Gives the half-power beamwidth in degrees; NaN where an edge is missing.</summary>
     public double WidthDeg => HighDeg - LowDeg;
 
@@ -51,7 +54,10 @@ public readonly record struct Beam(double PeakDeg, double PeakDb, double LowDeg,
             curve.EdgeDeg(highest, -1, edge, isUpper: false),
             curve.EdgeDeg(highest, +1, edge, isUpper: false),
             BackLevelDb(curve, highest, peakDeg),
-            peakDb - lowest);
+            peakDb - lowest)
+        {
+            IsPeakSeen = !double.IsNaN(y[0]) && !double.IsNaN(y[2]),
+        };
         return true;
     }
 

@@ -26,8 +26,12 @@ public readonly ref struct TurnedSpan
         _y = y;
         IsClosed = ClosesTurn(angleDeg);
 
-        // The direction at both ends of a repeated turn is one direction: it counts once.
-        Count = IsClosed && angleDeg[^1] - angleDeg[0] > FullTurnDeg - SameDirectionDeg ? angleDeg.Length - 1 : angleDeg.Length;
+        // A direction that comes again after a whole turn is the same direction: it counts once.
+        Count = angleDeg.Length;
+        while (IsClosed && angleDeg[Count - 1] - angleDeg[0] > FullTurnDeg - SameDirectionDeg)
+        {
+            Count--;
+        }
     }
 
     /// <summary>Gets whether the cut is a closed turn.</summary>
@@ -109,23 +113,26 @@ public readonly ref struct TurnedSpan
     }
 
     /// <summary>Tells whether the angles make a closed turn, the repeated direction given or left out.</summary>
-    private static bool ClosesTurn(ReadOnlySpan<double> angleDeg)
+    /// <param name="angleDeg">Angles in degrees, strictly rising.</param>
+    public static bool ClosesTurn(ReadOnlySpan<double> angleDeg)
     {
         if (angleDeg.Length < 3)
         {
             return false;
         }
 
-        // The gap over the seam may not be wider than the widest step of the data.
-        var span = angleDeg[^1] - angleDeg[0];
-        var widest = 0.0;
-        for (var i = 1; i < angleDeg.Length; i++)
-        {
-            widest = Math.Max(widest, angleDeg[i] - angleDeg[i - 1]);
-        }
-
-        return span + widest >= FullTurnDeg - SameDirectionDeg && span <= FullTurnDeg + SameDirectionDeg;
+        // The gap over the seam may not be wider than the steps beside it: a hole elsewhere in the data does not excuse a hole there.
+        var gap = FullTurnDeg - (angleDeg[^1] - angleDeg[0]);
+        return gap <= Math.Max(angleDeg[1] - angleDeg[0], angleDeg[^1] - angleDeg[^2]) + SameDirectionDeg;
     }
+
+    /// <summary>Gives a direction by the count of the angles: a closed turn knows it under one angle only, from its first one up to 360 degrees further.</summary>
+    /// <param name="angleDeg">Angles of the cut in degrees, strictly rising.</param>
+    /// <param name="directionDeg">The direction in degrees, which may be whole turns off.</param>
+    /// <returns>The same direction in degrees; as it is where the cut is open.</returns>
+    public static double InTurn(ReadOnlySpan<double> angleDeg, double directionDeg) => ClosesTurn(angleDeg)
+        ? directionDeg - (FullTurnDeg * Math.Floor((directionDeg - angleDeg[0] + SameDirectionDeg) / FullTurnDeg))
+        : directionDeg;
 
     /// <summary>Collects the samples around a segment; infinite ones (exact nulls) count as missing neighbours.</summary>
     private (int First, int Count) Gather(int segment, Span<double> x, Span<double> y)
