@@ -24,8 +24,10 @@ public readonly record struct Beam(double PeakDeg, double PeakDb, double LowDeg,
     /// <returns>Whether there is a finite level at all.</returns>
     public static bool TryFind(ReadOnlySpan<double> angleDeg, ReadOnlySpan<double> levelDb, out Beam beam)
     {
+        // A direction given at both ends of a turn counts by its first sample.
+        var curve = new TurnedSpan(angleDeg, levelDb);
         var (highest, lowest) = (-1, double.PositiveInfinity);
-        for (var i = 0; i < levelDb.Length; i++)
+        for (var i = 0; i < curve.Count; i++)
         {
             if (double.IsFinite(levelDb[i]))
             {
@@ -40,13 +42,17 @@ public readonly record struct Beam(double PeakDeg, double PeakDb, double LowDeg,
             return false;
         }
 
-        var curve = new TurnedSpan(angleDeg, levelDb);
+        var (peakDeg, peakDb) = curve.PeakOfLevel(highest);
 
-        // A maximum at the repeated end of a turn is the maximum at its start.
-        highest = highest < curve.Count ? highest : 0;
-        ReadOnlySpan<double> x = [curve.AngleDeg(highest - 1), curve.AngleDeg(highest), curve.AngleDeg(highest + 1)];
-        ReadOnlySpan<double> y = [curve.Y(highest - 1), curve.Y(highest), curve.Y(highest + 1)];
-        var (peakDeg, peakDb) = ParabolicPeak.Refine(x, y);
+        // Of two lobes nearly alike the higher one may have the lower sample.
+        for (var i = 0; i < curve.Count; i++)
+        {
+            if (curve.Y(i) > levelDb[highest] - TurnedSpan.LargestRefinementDb && !(curve.Y(i - 1) > curve.Y(i)) && !(curve.Y(i + 1) > curve.Y(i)) && curve.PeakOfLevel(i) is var rival && rival.LevelDb > peakDb)
+            {
+                (highest, peakDeg, peakDb) = (i, rival.AngleDeg, rival.LevelDb);
+            }
+        }
+
         var edge = peakDb - Decibels.HalfPower;
         beam = new(
             peakDeg,
@@ -56,7 +62,7 @@ public readonly record struct Beam(double PeakDeg, double PeakDb, double LowDeg,
             BackLevelDb(curve, highest, peakDeg),
             peakDb - lowest)
         {
-            IsPeakSeen = !double.IsNaN(y[0]) && !double.IsNaN(y[2]),
+            IsPeakSeen = !double.IsNaN(curve.Y(highest - 1)) && !double.IsNaN(curve.Y(highest + 1)),
         };
         return true;
     }

@@ -1,5 +1,3 @@
-using RangeReduce.Numerics;
-
 namespace RangeReduce.Reduction;
 
 /// <summary>Finds the lobes of a level along a cut: maxima that rise above their surroundings by a stated amount.</summary>
@@ -32,20 +30,13 @@ public static class LobeFinder
             var saddle = endsLeft && endsRight ? Math.Min(minimumLeft, minimumRight) : endsLeft ? minimumRight : endsRight ? minimumLeft : Math.Max(minimumLeft, minimumRight);
             if (level - saddle > leastRiseDb)
             {
-                var (peakDeg, peakDb) = Refined(curve, i);
+                // The same refinement as for the main beam: levels at samples would make two equal lobes unequal where the grid meets them unequally.
+                var (peakDeg, peakDb) = curve.PeakOfLevel(i);
                 lobes.Add(new(peakDeg, peakDb, level - saddle));
             }
         }
 
         return [.. lobes.OrderByDescending(lobe => lobe.LevelDb).ThenBy(lobe => lobe.AngleDeg)];
-    }
-
-    // The same refinement as for the main beam: levels at samples would make two equal lobes unequal where the grid meets them unequally.
-    private static (double PeakDeg, double PeakDb) Refined(TurnedSpan curve, int index)
-    {
-        ReadOnlySpan<double> x = [curve.AngleDeg(index - 1), curve.AngleDeg(index), curve.AngleDeg(index + 1)];
-        ReadOnlySpan<double> y = [curve.Y(index - 1), curve.Y(index), curve.Y(index + 1)];
-        return ParabolicPeak.Refine(x, y);
     }
 
     // A plateau counts once, at its first sample.

@@ -9,6 +9,9 @@ namespace RangeReduce.Reduction;
 /// </remarks>
 public readonly ref struct TurnedSpan
 {
+    /// <summary>The most in dB by which <see cref="PeakOfLevel"/> stands above its sample.</summary>
+    public const double LargestRefinementDb = SteepestTopDb / 8.0;
+
     private const double FullTurnDeg = 360.0;
 
     // A direction given at both ends of a turn differs from 360 degrees by no more than the digits of the file.
@@ -86,6 +89,15 @@ public readonly ref struct TurnedSpan
         return LocalCubicKernel.Crossing(x.Slice(first, count), y.Slice(first, count), 1 - first, level);
     }
 
+    /// <summary>Refines a maximum of a level in dB by the parabola through its sample and the two beside it.</summary>
+    /// <returns>Angle in degrees and level of the vertex; those of the sample where a neighbour is missing or so far down that the three are no top of a beam.</returns>
+    public (double AngleDeg, double LevelDb) PeakOfLevel(int index)
+    {
+        ReadOnlySpan<double> x = [AngleDeg(index - 1), AngleDeg(index), AngleDeg(index + 1)];
+        ReadOnlySpan<double> y = [Y(index - 1), Y(index), Y(index + 1)];
+        return y[1] - y[0] <= SteepestTopDb && y[1] - y[2] <= SteepestTopDb ? ParabolicPeak.Refine(x, y) : (x[1], y[1]);
+    }
+
     /// <summary>Walks from a sample to either side until the curve first leaves its bound.</summary>
     /// <param name="from">Index of the sample to start at.</param>
     /// <param name="step">+1 towards growing angles, −1 towards falling ones.</param>
@@ -150,6 +162,9 @@ public readonly ref struct TurnedSpan
         y[2] = double.IsNegativeInfinity(y[2]) ? Math.Min(y[1], 0.0) - NullDepthDb : y[2];
         return (first, last - first + 1);
     }
+
+    // A vertex stands above its sample by up to an eighth of the drop beside it: beside a null that would be made up. No beam that is sampled well drops so far in a step.
+    private const double SteepestTopDb = 10.0;
 
     // How far under its neighbour an exact null is put for interpolation.
     private const double NullDepthDb = 100.0;

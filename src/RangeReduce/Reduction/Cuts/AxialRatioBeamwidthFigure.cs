@@ -55,8 +55,9 @@ internal static class AxialRatioBeamwidthFigure
     public static (double LowDeg, double HighDeg, string? Open) Edges(ReadOnlySpan<double> angleDeg, ReadOnlySpan<double> y, double axisDeg, double limit)
     {
         axisDeg = TurnedSpan.InTurn(angleDeg, axisDeg);
+        var curve = new TurnedSpan(angleDeg, y);
         var nearest = 0;
-        for (var i = 1; i < angleDeg.Length; i++)
+        for (var i = 1; i < curve.Count; i++)
         {
             nearest = Math.Abs(angleDeg[i] - axisDeg) < Math.Abs(angleDeg[nearest] - axisDeg) ? i : nearest;
         }
@@ -66,8 +67,6 @@ internal static class AxialRatioBeamwidthFigure
             return (axisDeg, axisDeg, null);
         }
 
-        var curve = new TurnedSpan(angleDeg, y);
-        nearest = nearest < curve.Count ? nearest : 0;
         var (low, high) = (curve.EdgeDeg(nearest, -1, limit, isUpper: true), curve.EdgeDeg(nearest, +1, limit, isUpper: true));
         if (double.IsNaN(low) && double.IsNaN(high) && curve.IsClosed && !HoldsNaN(y[..curve.Count]))
         {
