@@ -5,7 +5,7 @@ public static class OutputFolder
 {
     /// <summary>Builds a folder.</summary>
     /// <param name="folder">Where it is to stand in the end.</param>
-    /// <param name="overwrite">Whether a folder that stands there may be replaced; it must then be one of ours (it holds results.json) or empty.</param>
+    /// <param name="overwrite">Whether a folder that stands there may be replaced; it must then be one of ours (it holds our results.json) or empty.</param>
     /// <param name="build">Fills the folder whose path it is given.</param>
     /// <exception cref="IOException">Something stands there and may not be replaced, or the disk failed.</exception>
     /// <exception cref="UnauthorizedAccessException">The place may not be written.</exception>
@@ -51,10 +51,25 @@ public static class OutputFolder
         }
 
         // --force replaces a report, not a folder of something else.
-        if (!File.Exists(Path.Combine(folder, "results.json")))
+        if (!HoldsReport(folder))
         {
-            throw new IOException($"{folder} exists and holds no report (there is no results.json in it), so --force does not replace it. Choose another folder with --out.");
+            throw new IOException($"{folder} exists and holds no report (there is no results.json of this program in it), so --force does not replace it. Choose another folder with --out.");
         }
+    }
+
+    // Results begin with their format; another program's results.json does not.
+    private static bool HoldsReport(string folder)
+    {
+        var results = Path.Combine(folder, "results.json");
+        if (!File.Exists(results))
+        {
+            return false;
+        }
+
+        using var reader = new StreamReader(results);
+        var head = new char[256];
+        var read = reader.ReadBlock(head);
+        return head.AsSpan(0, read).Contains(ResultsJsonWriter.Format, StringComparison.Ordinal);
     }
 
     private static void Replace(string place, string finished)

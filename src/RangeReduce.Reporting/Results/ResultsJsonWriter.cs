@@ -12,6 +12,9 @@ namespace RangeReduce.Reporting.Results;
 /// <remarks>Rows come in the order of the table; keys that do not apply are absent; a value that is not finite is null with the reason beside it.</remarks>
 public static class ResultsJsonWriter
 {
+    /// <summary>The word by which the format is known, at the head of the file.</summary>
+    public const string Format = "rangereduce-results";
+
     // The file is read by people too: degree signs and Greek letters stay as they are. It is never pasted into HTML.
     private static readonly JsonWriterOptions Options = new() { Indented = true, NewLine = "\n", Encoder = JavaScriptEncoder.UnsafeRelaxedJsonEscaping };
 
@@ -25,7 +28,7 @@ public static class ResultsJsonWriter
         ArgumentNullException.ThrowIfNull(stamp);
         using var json = new Utf8JsonWriter(target, Options);
         json.WriteStartObject();
-        json.WriteString("format", "rangereduce-results");
+        json.WriteString("format", Format);
         json.WriteNumber("version", 1);
         WriteStamp(json, stamp);
         WriteRun(json, reduced.Run);

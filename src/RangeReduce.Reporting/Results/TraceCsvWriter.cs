@@ -14,12 +14,13 @@ public static class TraceCsvWriter
         ArgumentNullException.ThrowIfNull(table);
         var files = new List<string>();
         var names = new HashSet<string>(StringComparer.OrdinalIgnoreCase);
-        foreach (var group in table.Traces.GroupBy(NameOf, StringComparer.Ordinal))
+        foreach (var group in table.Traces.GroupBy(trace => (trace.State, trace.Source, trace.Axis, trace.At, trace.PhiDeg, trace.ThetaDeg, trace.Method)))
         {
-            var name = group.Key;
+            var plain = NameOf(group.First());
+            var name = plain;
             for (var copy = 2; !names.Add(name); copy++)
             {
-                name = string.Create(CultureInfo.InvariantCulture, $"{group.Key}-{copy}");
+                name = string.Create(CultureInfo.InvariantCulture, $"{plain}-{copy}");
             }
 
             using var target = new FileStream(Path.Combine(folder, name + ".csv"), FileMode.CreateNew);
@@ -47,13 +48,15 @@ public static class TraceCsvWriter
         }
 
         writer.EndRecord();
-        foreach (var block in traces.GroupBy(trace => trace.FrequencyHz))
+
+        // Traces over different abscissae stand below each other.
+        foreach (var block in traces.GroupBy(trace => (trace.FrequencyHz, trace.X.Length, First: trace.X[0], Last: trace.X[^1])))
         {
             var curves = Array.ConvertAll(columns, column => block.FirstOrDefault(trace => trace.Quantity == column.Quantity && trace.Component == column.Component)?.Y);
             var x = block.First().X;
             for (var i = 0; i < x.Length; i++)
             {
-                writer.WriteField(Number(along ? block.Key!.Value : x[i]));
+                writer.WriteField(Number(along ? block.Key.FrequencyHz!.Value : x[i]));
                 if (along)
                 {
                     writer.WriteField(Number(x[i]));
@@ -72,7 +75,7 @@ public static class TraceCsvWriter
     private static string NameOf(Trace trace)
     {
         var kind = trace.Axis == TraceAxis.Angle
-            ? trace.ThetaDeg is { } theta ? string.Create(CultureInfo.InvariantCulture, $"cut-theta{theta:0.##}") : string.Create(CultureInfo.InvariantCulture, $"cut-phi{trace.PhiDeg ?? 0.0:0.##}")
+            ? trace.ThetaDeg is { } theta ? string.Create(CultureInfo.InvariantCulture, $"cut-theta{theta:0.##}") : trace.PhiDeg is { } phi ? string.Create(CultureInfo.InvariantCulture, $"cut-phi{phi:0.##}") : "cut"
             : trace.At == FigurePlace.Axis ? "axis" : "sweep";
         var method = trace.Method is null ? string.Empty : "-" + trace.Method;
         return FileNames.Safe($"{trace.State}-{trace.Source?.Word()}-{kind}{method}");

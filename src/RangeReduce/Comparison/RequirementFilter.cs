@@ -6,6 +6,9 @@ namespace RangeReduce.Comparison;
 /// <summary>Picks the rows of the table that a requirement is about.</summary>
 internal static class RequirementFilter
 {
+    /// <summary>Frequencies in hertz that differ by no more are the same: files give them with few decimals of a gigahertz.</summary>
+    public const double SameFrequencyHz = 0.5;
+
     private static readonly Quantity[] WithDirection =
     [
         QuantityCatalogue.Gain, QuantityCatalogue.Level, QuantityCatalogue.AxialRatio, QuantityCatalogue.Hand, QuantityCatalogue.CrossPolarRatio,
@@ -15,7 +18,7 @@ internal static class RequirementFilter
     public static Figure[] Figures(Requirement requirement, FigureTable table)
     {
         var quantity = requirement.Quantity;
-        return
+        Figure[] found =
         [
             .. table.Figures.Where(figure =>
                 figure.Quantity == quantity
@@ -26,8 +29,15 @@ internal static class RequirementFilter
                 && (requirement.Component == FieldComponent.None ? DefaultComponent(quantity, figure.Component) : figure.Component == requirement.Component)
                 && InBand(requirement, figure)
                 && (!WithDirection.Contains(quantity) || figure is { At: FigurePlace.Axis, PhiDeg: null, ThetaDeg: null })
+                && (quantity != QuantityCatalogue.TiltAngle || figure.At == FigurePlace.Axis)
                 && (figure.Rank is null or 1)),
         ];
+
+        // A width without component is that of all the power where there is one.
+        var ofAllPower = requirement.Component == FieldComponent.None && quantity == QuantityCatalogue.HalfPowerBeamwidth
+            ? Array.FindAll(found, figure => figure.Component == FieldComponent.None)
+            : [];
+        return ofAllPower.Length > 0 ? ofAllPower : found;
     }
 
     /// <summary>Gives the measured curve over frequency that answers a requirement over a band; null where figures have to.</summary>
@@ -39,6 +49,17 @@ internal static class RequirementFilter
             && Matches(requirement.State, trace.State)
             && (requirement.Component == FieldComponent.None ? DefaultComponent(requirement.Quantity, trace.Component) : trace.Component == requirement.Component));
 
+    /// <summary>Gives the measured curves along the angle of theta cuts that answer a requirement over a cone about the axis.</summary>
+    public static Trace[] TracesAlongAngle(Requirement requirement, FigureTable table) =>
+    [
+        .. table.Traces.Where(trace =>
+            trace.Quantity == requirement.Quantity
+            && trace is { Axis: TraceAxis.Angle, Source: DataSource.Measured, Method: null, ThetaDeg: null }
+            && Matches(requirement.State, trace.State)
+            && (requirement.Component == FieldComponent.None ? DefaultComponent(requirement.Quantity, trace.Component) : trace.Component == requirement.Component)
+            && (requirement is not { BandLowHz: { } low, BandHighHz: { } high } || (trace.FrequencyHz >= low - SameFrequencyHz && trace.FrequencyHz <= high + SameFrequencyHz))),
+    ];
+
     private static bool Matches(string? wanted, string? state) => wanted is null || string.Equals(wanted, state, StringComparison.Ordinal);
 
     // Without a component a gain is that of all the power; for other quantities any row will do.
@@ -48,5 +69,5 @@ internal static class RequirementFilter
     private static bool InBand(Requirement requirement, Figure figure) =>
         requirement is not { BandLowHz: { } low, BandHighHz: { } high }
         || figure.FrequencyHz is not { } hertz
-        || (hertz >= low - 0.5 && hertz <= high + 0.5);
+        || (hertz >= low - SameFrequencyHz && hertz <= high + SameFrequencyHz);
 }

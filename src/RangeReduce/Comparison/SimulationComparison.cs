@@ -8,16 +8,16 @@ public static class SimulationComparison
     /// <summary>Adds a deviation for every measured figure that has a simulated counterpart.</summary>
     /// <remarks>
     /// The join runs over the keys that say what a figure is about. Where a figure was found (the frequency of a resonance, the direction of a peak,
-    /// the edges of a band) is part of its finding, not a key.
+    /// the edges of a band) is part of its finding, not a key. A width that the data cut off is a lower bound and has no deviation.
     /// </remarks>
     public static void Add(FigureTable table)
     {
         ArgumentNullException.ThrowIfNull(table);
         var simulated = table.Figures
-            .Where(figure => figure.Source == DataSource.Simulated && double.IsFinite(figure.Value))
+            .Where(figure => figure is { Source: DataSource.Simulated, Method: null, OtherState: null, Open: null } && double.IsFinite(figure.Value))
             .GroupBy(Key.Of)
             .ToDictionary(group => group.Key, group => group.First());
-        var measured = table.Figures.Where(figure => figure.Source == DataSource.Measured && figure.Method is null && figure.OtherState is null && double.IsFinite(figure.Value)).ToArray();
+        var measured = table.Figures.Where(figure => figure is { Source: DataSource.Measured, Method: null, OtherState: null, Open: null } && double.IsFinite(figure.Value)).ToArray();
         foreach (var figure in measured)
         {
             if (simulated.TryGetValue(Key.Of(figure), out var counterpart))
@@ -30,7 +30,6 @@ public static class SimulationComparison
                     Source = null,
                     LowHz = null,
                     HighHz = null,
-                    Open = null,
                     Uncertainty = OfDeviation(figure),
                     Origin = new([.. figure.Origin.Inputs, .. counterpart.Origin.Inputs], figure.Origin.Corrections, "measured less simulated"),
                 });

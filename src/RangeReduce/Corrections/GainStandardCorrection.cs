@@ -46,9 +46,14 @@ public static class GainStandardCorrection
 
             if (calibration is null || calibration.LacksPortOf(cut.Cut))
             {
-                AddOnce(new(RemarkSeverity.Doubt, "no-standard-reading", $"The gain standard was not read through the {PortsOf(cut.Cut.Basis)} of the probe, so the cuts of state {cut.State} taken with them stay levels without gain.", State: cut.State));
+                AddOnce(new(RemarkSeverity.Doubt, "no-standard-reading", $"The gain standard was not read through (or did not stand along) each of the {PortsOf(cut.Cut.Basis)} of the probe, so the cuts of state {cut.State} taken with them stay levels without gain.", State: cut.State));
                 cuts.Add(cut);
                 continue;
+            }
+
+            if (calibration.HasOnePosition)
+            {
+                AddOnce(new(RemarkSeverity.Doubt, "standard-one-position", "The gain standard was read through the circular ports in one position only: their own axial ratio stays in the gain (a port of 1 dB axial ratio brings 0.5 dB). Read it in two positions at right angles."));
             }
 
             var changed = calibration.Apply(cut.Cut, out var lost);

@@ -8,6 +8,9 @@ namespace RangeReduce.Corrections;
 /// <summary>What has to be added to the levels of the two ports of a probe to make them partial gain.</summary>
 internal sealed class PortCalibration
 {
+    // Two ports of one probe differ by a few dB; a linear standard across a port shows 20 dB less and more (common practice).
+    private const double LeakageShare = 0.1;
+
     private readonly GainStandard _standard;
     private readonly PolarizationBasis _basis;
     private readonly (double[] FrequencyHz, double[] LevelDb)? _first;
@@ -16,11 +19,12 @@ internal sealed class PortCalibration
     private PortCalibration(GainStandard standard, PolarizationBasis basis, StateCut[] readings)
     {
         (_standard, _basis) = (standard, basis);
-        _first = PortLevel(readings, cut => cut.First);
-        _second = PortLevel(readings, cut => cut.Second);
+        _first = PortLevel(readings, cut => cut.First, cut => cut.Second);
+        _second = PortLevel(readings, cut => cut.Second, cut => cut.First);
+        HasOnePosition = basis == PolarizationBasis.RightLeft && readings.Length == 1;
         Inputs = [.. readings.SelectMany(reading => reading.InputIds).Distinct(StringComparer.Ordinal)];
         Words = basis == PolarizationBasis.ThetaPhi
-            ? string.Create(CultureInfo.InvariantCulture, $"linear ports: the strongest of {readings.Length} readings on each port, no 3 dB")
+            ? string.Create(CultureInfo.InvariantCulture, $"linear ports: each by the strongest of the {readings.Length} readings with the standard along it, no 3 dB")
             : string.Create(CultureInfo.InvariantCulture, $"circular ports: power mean of {readings.Length} positions of the standard, less 3.01 dB for a linear standard on a circular port");
     }
 
@@ -29,6 +33,9 @@ internal sealed class PortCalibration
 
     /// <summary>Gets how the ports were calibrated, in words.</summary>
     public string Words { get; }
+
+    /// <summary>Gets whether circular ports were read with the standard in one position only, so that their own axial ratio stays in the gain.</summary>
+    public bool HasOnePosition { get; }
 
     /// <summary>Gathers the readings through a probe of the basis; null where there are none.</summary>
     public static PortCalibration? Of(GainStandard standard, PolarizationBasis basis)
@@ -70,9 +77,12 @@ internal sealed class PortCalibration
         LinearTable.InterpolateOverLogarithm(port.FrequencyHz, port.LevelDb, frequencyHz);
 
     /// <summary>Gives the level of the standard on one port over the frequencies of the readings.</summary>
-    private (double[] FrequencyHz, double[] LevelDb)? PortLevel(StateCut[] readings, Func<PatternCut, PatternChannel?> port)
+    /// <remarks>A linear port is read only by a standard that stands along it. What the standard shows far below that on the other port is leakage.</remarks>
+    private (double[] FrequencyHz, double[] LevelDb)? PortLevel(StateCut[] readings, Func<PatternCut, PatternChannel?> port, Func<PatternCut, PatternChannel?> otherPort)
     {
-        var taken = readings.Where(reading => port(reading.Cut) is not null).ToArray();
+        var taken = readings
+            .Where(reading => port(reading.Cut) is { } own && (_basis == PolarizationBasis.RightLeft || otherPort(reading.Cut) is not { } other || LargestPower(own) > LeakageShare * LargestPower(other)))
+            .ToArray();
         if (taken.Length == 0)
         {
             return null;
@@ -83,21 +93,37 @@ internal sealed class PortCalibration
         var levels = new double[frequencies.Length];
         for (var i = 0; i < frequencies.Length; i++)
         {
-            var powers = taken.Select(reading => PeakPower(reading.Cut, port(reading.Cut)!, Array.BinarySearch(reading.Cut.FrequencyHz, frequencies[i])));
-            levels[i] = Decibels.OfPower(_basis == PolarizationBasis.ThetaPhi ? powers.Max() : powers.Average());
+            var powers = Array.ConvertAll(taken, reading => PeakPower(reading.Cut, port(reading.Cut)!, Array.BinarySearch(reading.Cut.FrequencyHz, frequencies[i])));
+            levels[i] = powers.Any(double.IsNaN) ? double.NaN : Decibels.OfPower(_basis == PolarizationBasis.ThetaPhi ? powers.Max() : powers.Average());
         }
 
         return (frequencies, levels);
     }
 
-    private static double PeakPower(PatternCut cut, PatternChannel channel, int frequency)
+    private static double LargestPower(PatternChannel channel)
     {
-        var peak = 0.0;
-        for (var angle = 0; angle < cut.AngleDeg.Length; angle++)
+        var largest = 0.0;
+        for (var i = 0; i < channel.Re.Length; i++)
         {
-            peak = Math.Max(peak, channel.Power((frequency * cut.AngleDeg.Length) + angle));
+            var power = channel.Power(i);
+            largest = power > largest ? power : largest;
         }
 
-        return peak;
+        return largest;
+    }
+
+    /// <summary>Gives the highest power of a reading; NaN where there is none, or where it lies beside a missing sample and may not be the highest.</summary>
+    private static double PeakPower(PatternCut cut, PatternChannel channel, int frequency)
+    {
+        var (peak, at, count) = (0.0, -1, cut.AngleDeg.Length);
+        for (var angle = 0; angle < count; angle++)
+        {
+            var power = channel.Power((frequency * count) + angle);
+            (peak, at) = power > peak ? (power, angle) : (peak, at);
+        }
+
+        return at < 0 || IsMissing(at - 1) || IsMissing(at + 1) ? double.NaN : peak;
+
+        bool IsMissing(int angle) => angle >= 0 && angle < count && double.IsNaN(channel.Power((frequency * count) + angle));
     }
 }

@@ -28,7 +28,7 @@ public static class SimulatedMismatchCorrection
             }
 
             var sweep = run.Sweeps.FirstOrDefault(sweep => sweep.Source == DataSource.Simulated && string.Equals(sweep.State, cut.State, StringComparison.Ordinal));
-            if (sweep is null || cut.Cut.FrequencyHz[0] < sweep.Sweep.FrequencyHz[0] || cut.Cut.FrequencyHz[^1] > sweep.Sweep.FrequencyHz[^1])
+            if (sweep is null || sweep.Sweep.Count < 2 || cut.Cut.FrequencyHz[0] < sweep.Sweep.FrequencyHz[0] || cut.Cut.FrequencyHz[^1] > sweep.Sweep.FrequencyHz[^1])
             {
                 var remark = new Remark(RemarkSeverity.Note, "gain-not-realized", $"The simulated gain of state {cut.State} has no mismatch in it, for want of a simulated sweep over its frequencies: it is not compared with measured realized gain.", State: cut.State);
                 if (!remarks.Contains(remark))

@@ -6,7 +6,7 @@ namespace RangeReduce.Networks;
 public static class Reflection
 {
     /// <summary>Gives the return loss −20 lg |Γ| in dB: positive for a passive antenna, +∞ for a perfect match.</summary>
-    public static double ReturnLossDb(double magnitude) => -20.0 * Math.Log10(magnitude);
+    public static double ReturnLossDb(double magnitude) => 20.0 * Math.Log10(1.0 / magnitude);
 
     /// <summary>Gives |Γ| of a return loss in dB.</summary>
     public static double MagnitudeOfReturnLoss(double returnLossDb) => Math.Pow(10.0, -returnLossDb / 20.0);
@@ -23,7 +23,7 @@ public static class Reflection
     }
 
     /// <summary>Gives −10 lg (1 − |Γ|²) in dB, against a generator of the reference impedance; +∞ at |Γ| = 1, NaN above it.</summary>
-    public static double MismatchLossDb(double magnitude) => magnitude > 1.0 ? double.NaN : -10.0 * Math.Log10(1.0 - (magnitude * magnitude));
+    public static double MismatchLossDb(double magnitude) => magnitude > 1.0 ? double.NaN : 10.0 * Math.Log10(1.0 / (1.0 - (magnitude * magnitude)));
 
     /// <summary>Gives the impedance Z = Z0 (1 + Γ)/(1 − Γ) in ohm.</summary>
     public static Complex ImpedanceOhm(Complex reflection, double referenceOhm) => referenceOhm * (1.0 + reflection) / (1.0 - reflection);

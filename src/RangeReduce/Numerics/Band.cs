@@ -5,8 +5,8 @@ namespace RangeReduce.Numerics;
 /// <param name="High">Upper edge.</param>
 /// <param name="OpenLow">Whether the data end (or a sample is missing) before the lower edge is seen.</param>
 /// <param name="OpenHigh">Whether the data end (or a sample is missing) before the upper edge is seen.</param>
-/// <param name="First">Index of the first sample inside.</param>
-/// <param name="Last">Index of the last sample inside.</param>
+/// <param name="First">Index of the first sample inside; of the sample before a band that fits between two samples.</param>
+/// <param name="Last">Index of the last sample inside; of the sample after a band that fits between two samples.</param>
 public readonly record struct Band(double Low, double High, bool OpenLow, bool OpenHigh, int First, int Last)
 {
     /// <summary>Gives the distance of the edges.</summary>

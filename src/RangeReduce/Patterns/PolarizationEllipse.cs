@@ -11,13 +11,21 @@ public static class PolarizationEllipse
     /// <summary>Axial ratio in dB below which the tilt has no meaning.</summary>
     public const double TiltFromDb = 0.1;
 
+    // Amplitudes that differ by less than this share of their sum are equal but for the last digits of the arithmetic: 260 dB is no axial ratio.
+    private const double RoundingShare = 1e-13;
+
     /// <summary>Gives the axial ratio in dB, 0 for a circle and never negative.</summary>
     /// <param name="right">Amplitude of the right-hand component, any scale.</param>
     /// <param name="left">Amplitude of the left-hand component, same scale.</param>
-    /// <returns>20 lg ((a + b)/|a − b|); +∞ for equal amplitudes, NaN if both are zero or one is missing.</returns>
+    /// <returns>20 lg ((a + b)/|a − b|); +∞ for amplitudes that are equal to rounding, NaN if both are zero or one is missing.</returns>
     public static double AxialRatioDb(double right, double left)
     {
         var (sum, difference) = (right + left, Math.Abs(right - left));
+        if (difference < RoundingShare * sum)
+        {
+            return double.PositiveInfinity;
+        }
+
         return sum > 0.0 ? 20.0 * Math.Log10(sum / difference) : double.NaN;
     }
 

@@ -11,6 +11,9 @@ namespace RangeReduce.Reduction;
 /// <param name="SpanDb">Largest less smallest level of the cut in dB.</param>
 public readonly record struct Beam(double PeakDeg, double PeakDb, double LowDeg, double HighDeg, double BackDb, double SpanDb)
 {
+    /// <summary>Gets whether samples on both sides of the highest one are there; if not, the true maximum may lie beyond the data or in a gap.</summary>
+    public bool IsPeakSeen { get; init; }
+
     /// <summary>Gives the half-power beamwidth in degrees; NaN where an edge is missing.</summary>
     public double WidthDeg => HighDeg - LowDeg;
 
@@ -21,8 +24,10 @@ public readonly record struct Beam(double PeakDeg, double PeakDb, double LowDeg,
     /// <returns>Whether there is a finite level at all.</returns>
     public static bool TryFind(ReadOnlySpan<double> angleDeg, ReadOnlySpan<double> levelDb, out Beam beam)
     {
+        // A direction given at both ends of a turn counts by its first sample.
+        var curve = new TurnedSpan(angleDeg, levelDb);
         var (highest, lowest) = (-1, double.PositiveInfinity);
-        for (var i = 0; i < levelDb.Length; i++)
+        for (var i = 0; i < curve.Count; i++)
         {
             if (double.IsFinite(levelDb[i]))
             {
@@ -37,13 +42,17 @@ public readonly record struct Beam(double PeakDeg, double PeakDb, double LowDeg,
             return false;
         }
 
-        var curve = new TurnedSpan(angleDeg, levelDb);
+        var (peakDeg, peakDb) = curve.PeakOfLevel(highest);
 
-        // A maximum at the repeated end of a turn is the maximum at its start.
-        highest = highest < curve.Count ? highest : 0;
-        ReadOnlySpan<double> x = [curve.AngleDeg(highest - 1), curve.AngleDeg(highest), curve.AngleDeg(highest + 1)];
-        ReadOnlySpan<double> y = [curve.Y(highest - 1), curve.Y(highest), curve.Y(highest + 1)];
-        var (peakDeg, peakDb) = ParabolicPeak.Refine(x, y);
+        // Of two lobes nearly alike the higher one may have the lower sample.
+        for (var i = 0; i < curve.Count; i++)
+        {
+            if (curve.Y(i) > levelDb[highest] - TurnedSpan.LargestRefinementDb && !(curve.Y(i - 1) > curve.Y(i)) && !(curve.Y(i + 1) > curve.Y(i)) && curve.PeakOfLevel(i) is var rival && rival.LevelDb > peakDb)
+            {
+                (highest, peakDeg, peakDb) = (i, rival.AngleDeg, rival.LevelDb);
+            }
+        }
+
         var edge = peakDb - Decibels.HalfPower;
         beam = new(
             peakDeg,
@@ -51,7 +60,10 @@ public readonly record struct Beam(double PeakDeg, double PeakDb, double LowDeg,
             curve.EdgeDeg(highest, -1, edge, isUpper: false),
             curve.EdgeDeg(highest, +1, edge, isUpper: false),
             BackLevelDb(curve, highest, peakDeg),
-            peakDb - lowest);
+            peakDb - lowest)
+        {
+            IsPeakSeen = !double.IsNaN(curve.Y(highest - 1)) && !double.IsNaN(curve.Y(highest + 1)),
+        };
         return true;
     }
 

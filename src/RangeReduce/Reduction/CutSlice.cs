@@ -97,69 +97,36 @@ public sealed class CutSlice
     /// <returns>The amplitude (square root of the power); NaN outside the cut and next to a missing sample.</returns>
     public double AmplitudeAt(FieldComponent component, double angleDeg)
     {
-        var level = LevelDb(component);
-        if (!TryFindSegment(angleDeg, out var segment))
-        {
-            return double.NaN;
-        }
-
-        if (IsSample(angleDeg, segment, out var sample))
-        {
-            return Decibels.ToAmplitude(level[sample]);
-        }
-
-        var amplitude = Array.ConvertAll(level, Decibels.ToAmplitude);
-        return Math.Max(0.0, LocalCubic.Interpolate(AngleDeg, amplitude, segment, angleDeg));
+        var amplitude = Array.ConvertAll(LevelDb(component), Decibels.ToAmplitude);
+        return Math.Max(0.0, ValueAt(amplitude, angleDeg));
     }
 
     /// <summary>Gives the tilt in a direction, from the components with phase, interpolated between samples.</summary>
     /// <returns>Degrees above −90 and up to 90; NaN outside the cut and next to a missing sample.</returns>
     public double TiltDegAt(double angleDeg)
     {
-        if (!TryFindSegment(angleDeg, out var segment))
-        {
-            return double.NaN;
-        }
-
         var (right, left) = (_cut.Right!, _cut.Left!);
         return PolarizationEllipse.TiltDeg(At(right.Re), At(right.Im!), At(left.Re), At(left.Im!));
 
-        double At(double[] plane)
-        {
-            var row = plane.AsSpan(_start, AngleDeg.Length);
-            return IsSample(angleDeg, segment, out var sample) ? row[sample] : LocalCubic.Interpolate(AngleDeg, row, segment, angleDeg);
-        }
+        double At(double[] plane) => ValueAt(plane.AsSpan(_start, AngleDeg.Length), angleDeg);
     }
 
-    private bool TryFindSegment(double angleDeg, out int segment)
+    /// <summary>Gives a value in a direction, over the seam of a closed turn too; NaN outside the cut and next to a missing sample.</summary>
+    private double ValueAt(ReadOnlySpan<double> y, double directionDeg)
     {
-        var angles = AngleDeg;
-        segment = 0;
-        if (angles.Length == 1)
+        var curve = new TurnedSpan(AngleDeg, y);
+        var at = TurnedSpan.InTurn(AngleDeg, directionDeg);
+        var found = Array.BinarySearch(AngleDeg, at);
+        var next = found >= 0 ? found : ~found;
+        foreach (var sample in (ReadOnlySpan<int>)[next, next - 1])
         {
-            return Math.Abs(angles[0] - angleDeg) < SameAngleDeg;
+            if (Math.Abs(curve.AngleDeg(sample) - at) < SameAngleDeg)
+            {
+                return curve.Y(sample);
+            }
         }
 
-        if (angleDeg < angles[0] - SameAngleDeg || angleDeg > angles[^1] + SameAngleDeg)
-        {
-            return false;
-        }
-
-        var found = Array.BinarySearch(angles, angleDeg);
-        segment = Math.Clamp(found >= 0 ? found : ~found - 1, 0, angles.Length - 2);
-        return true;
-    }
-
-    private bool IsSample(double angleDeg, int segment, out int sample)
-    {
-        sample = segment;
-        if (Math.Abs(AngleDeg[segment] - angleDeg) < SameAngleDeg)
-        {
-            return true;
-        }
-
-        sample = Math.Min(segment + 1, AngleDeg.Length - 1);
-        return Math.Abs(AngleDeg[sample] - angleDeg) < SameAngleDeg;
+        return curve.Between(next - 1, at);
     }
 
     // Angles are written with a few decimals; nobody moves a positioner by a millionth of a degree.

@@ -8,6 +8,8 @@ namespace RangeReduce.Reduction;
 /// <remarks>A sign error turns right into left and nobody notices: when every state is turned it is a convention, when one of several is, its files are swapped or mislabelled.</remarks>
 public static class HandAudit
 {
+    private const string Conventions = "the time factor (exp(+jwt) or exp(-iwt)), the sign or the order of the two probe ports, the sense in which the angle is counted";
+
     /// <summary>Adds a remark for every state whose measured hand is not the expected one.</summary>
     public static void Add(MeasurementRun run, ReductionContext context)
     {
@@ -18,12 +20,15 @@ public static class HandAudit
             .Where(row => row.Expected is Hand.Right or Hand.Left && row.Found is not null)
             .ToArray();
         var turned = judged.Where(row => row.Found is Hand.Right or Hand.Left && row.Found != row.Expected).ToArray();
-        var all = turned.Length == judged.Length && judged.Length > 1;
         foreach (var (state, expected, found) in turned)
         {
-            var cause = all
-                ? "Every state is turned, so look at the conventions first: the time factor (exp(+jwt) or exp(-iwt)), the sign or the order of the two probe ports, the sense in which the angle is counted."
-                : "Other states have the hand that they should, so look first for swapped or mislabelled files of this state.";
+            var cause = judged.Length == 1
+                ? $"No other state tells, so it may be the conventions ({Conventions}) or a swapped or mislabelled file."
+                : turned.Length == judged.Length
+                ? $"Every state is turned, so look at the conventions first: {Conventions}. Files of two states that were exchanged look the same."
+                : judged.Any(row => row.Found == row.Expected)
+                ? "Other states have the hand that they should, so look first for swapped or mislabelled files of this state."
+                : $"The other states are linear, so it may be the conventions ({Conventions}) or a swapped or mislabelled file.";
             context.Remarks.Add(
                 RemarkSeverity.Fault,
                 state.KnownHand is null ? "hand-not-intended" : "hand-not-known",

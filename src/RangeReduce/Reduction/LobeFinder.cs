@@ -6,9 +6,9 @@ public static class LobeFinder
     /// <summary>A lobe rises by more than this in dB; smaller waves are ripple (the contract of the results).</summary>
     public const double LeastRiseDb = 0.5;
 
-    /// <summary>Finds the lobes, the highest first.</summary>
+    /// <summary>Finds the lobes, the highest first. A level that is highest at the end of the data or beside a missing sample is none: its maximum was not seen.</summary>
     /// <param name="angleDeg">Angles in degrees, strictly rising.</param>
-    /// <param name="levelDb">Levels in dB; a missing sample ends a lobe like the end of the data.</param>
+    /// <param name="levelDb">Levels in dB; a missing sample is like the end of the data.</param>
     /// <param name="leastRiseDb">Least rise in dB.</param>
     /// <param name="floorDb">Level in dB below which nothing is a lobe, such as 10 dB above the noise floor; −∞ where none is known.</param>
     public static IReadOnlyList<Lobe> Find(ReadOnlySpan<double> angleDeg, ReadOnlySpan<double> levelDb, double leastRiseDb = LeastRiseDb, double floorDb = double.NegativeInfinity)
@@ -30,18 +30,20 @@ public static class LobeFinder
             var saddle = endsLeft && endsRight ? Math.Min(minimumLeft, minimumRight) : endsLeft ? minimumRight : endsRight ? minimumLeft : Math.Max(minimumLeft, minimumRight);
             if (level - saddle > leastRiseDb)
             {
-                lobes.Add(new(angleDeg[i], level, level - saddle));
+                // The same refinement as for the main beam: levels at samples would make two equal lobes unequal where the grid meets them unequally.
+                var (peakDeg, peakDb) = curve.PeakOfLevel(i);
+                lobes.Add(new(peakDeg, peakDb, level - saddle));
             }
         }
 
         return [.. lobes.OrderByDescending(lobe => lobe.LevelDb).ThenBy(lobe => lobe.AngleDeg)];
     }
 
-    // A plateau counts once, at its first sample; a lone sample between missing ones is no maximum.
+    // A plateau counts once, at its first sample.
     private static bool IsMaximum(TurnedSpan curve, int index)
     {
         var (before, level) = (curve.Y(index - 1), curve.Y(index));
-        if (before >= level)
+        if (!(before < level))
         {
             return false;
         }
@@ -52,7 +54,7 @@ public static class LobeFinder
             next++;
         }
 
-        return !(curve.Y(next) > level) && !(double.IsNaN(before) && double.IsNaN(curve.Y(index + 1)));
+        return curve.Y(next) < level;
     }
 
     // Goes down one side until something higher stands there; tells the lowest level on the way and whether the data ended first.

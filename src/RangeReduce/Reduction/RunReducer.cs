@@ -1,3 +1,4 @@
+using RangeReduce.Diagnostics;
 using RangeReduce.Patterns;
 using RangeReduce.Quantities;
 using RangeReduce.Reduction.Cuts;
@@ -48,14 +49,25 @@ public static class RunReducer
     {
         var context = new ReductionContext(run);
 
-        // A second sweep of the same state and source is a repeat: the first one gives the figures.
-        var sweep = run.Sweeps.FirstOrDefault(sweep => sweep.Source == source && string.Equals(sweep.State, state, StringComparison.Ordinal));
-        if (sweep is not null)
+        // Two sweeps or two like cuts of one state would give every figure twice: the first one gives the figures, and the others are named.
+        var sweeps = run.Sweeps.Where(sweep => sweep.Source == source && string.Equals(sweep.State, state, StringComparison.Ordinal)).ToArray();
+        foreach (var (sweep, index) in sweeps.Select((sweep, index) => (sweep, index)))
         {
-            ReflectionReducer.Reduce(sweep, context);
+            if (index == 0)
+            {
+                ReflectionReducer.Reduce(sweep, context);
+                continue;
+            }
+
+            context.Remarks.Add(RemarkSeverity.Doubt, "sweep-not-reduced", $"State {state} has more than one {source.Word()} sweep: figures are made of the first, not of this one.", state, context.PlaceOf(sweep.InputId));
         }
 
-        var cuts = run.Cuts.Where(cut => cut.Source == source && string.Equals(cut.State, state, StringComparison.Ordinal)).DistinctBy(CutKey).ToArray();
+        var all = run.Cuts.Where(cut => cut.Source == source && string.Equals(cut.State, state, StringComparison.Ordinal)).ToArray();
+        var cuts = all.DistinctBy(CutKey).ToArray();
+        foreach (var repeat in all.Except(cuts))
+        {
+            context.Remarks.Add(RemarkSeverity.Doubt, "cut-not-reduced", $"State {state} has the same {source.Word()} cut more than once: figures are made of the first, not of this one.", state, context.PlaceOf(repeat.InputIds[0]));
+        }
 
         // Two linear components with phase tell everything, so they give the figures without a method; other kinds stand beside them.
         var kinds = cuts.GroupBy(cut => (cut.Cut.Basis, cut.Cut.Reference))

@@ -9,6 +9,9 @@ namespace RangeReduce.Reduction;
 /// </remarks>
 public readonly ref struct TurnedSpan
 {
+    /// <summary>The most in dB by which <see cref="PeakOfLevel"/> stands above its sample.</summary>
+    public const double LargestRefinementDb = SteepestTopDb / 8.0;
+
     private const double FullTurnDeg = 360.0;
 
     // A direction given at both ends of a turn differs from 360 degrees by no more than the digits of the file.
@@ -26,8 +29,12 @@ public readonly ref struct TurnedSpan
         _y = y;
         IsClosed = ClosesTurn(angleDeg);
 
-        // The direction at both ends of a repeated turn is one direction: it counts once.
-        Count = IsClosed && angleDeg[^1] - angleDeg[0] > FullTurnDeg - SameDirectionDeg ? angleDeg.Length - 1 : angleDeg.Length;
+        // A direction that comes again after a whole turn is the same direction: it counts once.
+        Count = angleDeg.Length;
+        while (IsClosed && angleDeg[Count - 1] - angleDeg[0] > FullTurnDeg - SameDirectionDeg)
+        {
+            Count--;
+        }
     }
 
     /// <summary>Gets whether the cut is a closed turn.</summary>
@@ -82,6 +89,15 @@ public readonly ref struct TurnedSpan
         return LocalCubicKernel.Crossing(x.Slice(first, count), y.Slice(first, count), 1 - first, level);
     }
 
+    /// <summary>Refines a maximum of a level in dB by the parabola through its sample and the two beside it.</summary>
+    /// <returns>Angle in degrees and level of the vertex; those of the sample where a neighbour is missing or so far down that the three are no top of a beam.</returns>
+    public (double AngleDeg, double LevelDb) PeakOfLevel(int index)
+    {
+        ReadOnlySpan<double> x = [AngleDeg(index - 1), AngleDeg(index), AngleDeg(index + 1)];
+        ReadOnlySpan<double> y = [Y(index - 1), Y(index), Y(index + 1)];
+        return y[1] - y[0] <= SteepestTopDb && y[1] - y[2] <= SteepestTopDb ? ParabolicPeak.Refine(x, y) : (x[1], y[1]);
+    }
+
     /// <summary>Walks from a sample to either side until the curve first leaves its bound.</summary>
     /// <param name="from">Index of the sample to start at.</param>
     /// <param name="step">+1 towards growing angles, −1 towards falling ones.</param>
@@ -109,18 +125,26 @@ public readonly ref struct TurnedSpan
     }
 
     /// <summary>Tells whether the angles make a closed turn, the repeated direction given or left out.</summary>
-    private static bool ClosesTurn(ReadOnlySpan<double> angleDeg)
+    /// <param name="angleDeg">Angles in degrees, strictly rising.</param>
+    public static bool ClosesTurn(ReadOnlySpan<double> angleDeg)
     {
         if (angleDeg.Length < 3)
         {
             return false;
         }
 
-        // The gap over the seam may not be wider than the steps beside it.
-        var span = angleDeg[^1] - angleDeg[0];
-        var beside = Math.Max(angleDeg[1] - angleDeg[0], angleDeg[^1] - angleDeg[^2]);
-        return span + beside >= FullTurnDeg - SameDirectionDeg && span <= FullTurnDeg + SameDirectionDeg;
+        // The gap over the seam may not be wider than the steps beside it: a hole elsewhere in the data does not excuse a hole there.
+        var gap = FullTurnDeg - (angleDeg[^1] - angleDeg[0]);
+        return gap <= Math.Max(angleDeg[1] - angleDeg[0], angleDeg[^1] - angleDeg[^2]) + SameDirectionDeg;
     }
+
+    /// <summary>Gives a direction by the count of the angles: a closed turn knows it under one angle only, from its first one up to 360 degrees further.</summary>
+    /// <param name="angleDeg">Angles of the cut in degrees, strictly rising.</param>
+    /// <param name="directionDeg">The direction in degrees, which may be whole turns off.</param>
+    /// <returns>The same direction in degrees; as it is where the cut is open.</returns>
+    public static double InTurn(ReadOnlySpan<double> angleDeg, double directionDeg) => ClosesTurn(angleDeg)
+        ? directionDeg - (FullTurnDeg * Math.Floor((directionDeg - angleDeg[0] + SameDirectionDeg) / FullTurnDeg))
+        : directionDeg;
 
     /// <summary>Collects the samples around a segment; infinite ones (exact nulls) count as missing neighbours.</summary>
     private (int First, int Count) Gather(int segment, Span<double> x, Span<double> y)
@@ -138,6 +162,9 @@ public readonly ref struct TurnedSpan
         y[2] = double.IsNegativeInfinity(y[2]) ? Math.Min(y[1], 0.0) - NullDepthDb : y[2];
         return (first, last - first + 1);
     }
+
+    // A vertex stands above its sample by up to an eighth of the drop beside it: beside a null that would be made up. No beam that is sampled well drops so far in a step.
+    private const double SteepestTopDb = 10.0;
 
     // How far under its neighbour an exact null is put for interpolation.
     private const double NullDepthDb = 100.0;

@@ -188,7 +188,7 @@ internal sealed class CutTrial
             Set(CutSlot.LeftWidth, Beam.TryFind(_angleDeg, _left.AsSpan(0, _angleDeg.Length), out var left) ? left.WidthDeg : double.NaN);
         }
 
-        TakeDirection(BeamFigures.Inside(_angleDeg, beam.PeakDeg), CutSlot.PeakRight);
+        TakeDirection(Math.Clamp(TurnedSpan.InTurn(_angleDeg, beam.PeakDeg), _angleDeg[0], _angleDeg[^1]), CutSlot.PeakRight);
     }
 
     /// <summary>Gives the highest level around a lobe: where noise moved its maximum by a few samples it is still the same lobe.</summary>

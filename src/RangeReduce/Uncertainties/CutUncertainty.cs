@@ -61,10 +61,11 @@ internal sealed class CutUncertainty
         if (slot is not (CutSlot.AxisCrossOverCo or CutSlot.PeakCrossOverCo))
         {
             var trials = Array.ConvertAll(_trials[index], value => value + shift);
-            if (figure.Quantity == QuantityCatalogue.TiltAngle)
+            // An axis has no ends and a direction no seam: each trial is turned to lie about the value.
+            var turn = figure.Quantity == QuantityCatalogue.TiltAngle ? 180.0 : figure.Quantity == QuantityCatalogue.PeakDirection ? 360.0 : 0.0;
+            if (turn > 0.0)
             {
-                // An axis has no ends: turn each trial by half turns to within 90 degrees of the value.
-                trials = Array.ConvertAll(trials, tilt => figure.Value + Math.IEEERemainder(tilt - figure.Value, 180.0));
+                trials = Array.ConvertAll(_trials[index], angle => figure.Value + Math.IEEERemainder(angle - figure.Value, turn));
             }
 
             return CoverageInterval.Of(trials) is { } interval

@@ -51,11 +51,13 @@ internal static class AxialRatioBeamwidthFigure
     /// <param name="y">Ordinates, as many.</param>
     /// <param name="axisDeg">Direction of the axis in degrees.</param>
     /// <param name="limit">The limit.</param>
-    /// <returns>Both edges in degrees, and which of them the data cut off; both edges at the axis where the axis itself fails.</returns>
+    /// <returns>Both edges in degrees, and which of them the data cut off; both edges at the axis where the axis itself fails, half a turn to either side where the whole turn keeps the limit.</returns>
     public static (double LowDeg, double HighDeg, string? Open) Edges(ReadOnlySpan<double> angleDeg, ReadOnlySpan<double> y, double axisDeg, double limit)
     {
+        axisDeg = TurnedSpan.InTurn(angleDeg, axisDeg);
+        var curve = new TurnedSpan(angleDeg, y);
         var nearest = 0;
-        for (var i = 1; i < angleDeg.Length; i++)
+        for (var i = 1; i < curve.Count; i++)
         {
             nearest = Math.Abs(angleDeg[i] - axisDeg) < Math.Abs(angleDeg[nearest] - axisDeg) ? i : nearest;
         }
@@ -65,9 +67,12 @@ internal static class AxialRatioBeamwidthFigure
             return (axisDeg, axisDeg, null);
         }
 
-        var curve = new TurnedSpan(angleDeg, y);
-        nearest = nearest < curve.Count ? nearest : 0;
         var (low, high) = (curve.EdgeDeg(nearest, -1, limit, isUpper: true), curve.EdgeDeg(nearest, +1, limit, isUpper: true));
+        if (double.IsNaN(low) && double.IsNaN(high) && curve.IsClosed && !HoldsNaN(y[..curve.Count]))
+        {
+            return (axisDeg - 180.0, axisDeg + 180.0, null);
+        }
+
         var open = (double.IsNaN(low), double.IsNaN(high)) switch
         {
             (true, true) => "both",
@@ -78,12 +83,24 @@ internal static class AxialRatioBeamwidthFigure
         return (double.IsNaN(low) ? Farthest(curve, nearest, -1) : low, double.IsNaN(high) ? Farthest(curve, nearest, +1) : high, open);
     }
 
-    // Where an edge was not seen the range reaches to the last sample before the gap; a whole turn is parted at its far side.
+    private static bool HoldsNaN(ReadOnlySpan<double> y)
+    {
+        foreach (var value in y)
+        {
+            if (double.IsNaN(value))
+            {
+                return true;
+            }
+        }
+
+        return false;
+    }
+
+    // Where an edge was not seen the range reaches to the last sample before the gap.
     private static double Farthest(TurnedSpan curve, int from, int step)
     {
-        var limit = curve.IsClosed ? curve.Count / 2 : curve.Count;
         var index = from;
-        for (var walked = 0; walked < limit && !double.IsNaN(curve.Y(index + step)); walked++)
+        for (var walked = 0; walked < curve.Count && !double.IsNaN(curve.Y(index + step)); walked++)
         {
             index += step;
         }

@@ -21,14 +21,16 @@ public static class AxisReducer
     {
         ArgumentNullException.ThrowIfNull(cuts);
         ArgumentNullException.ThrowIfNull(context);
-        var usable = cuts.Where(cut => cut.HasEllipse && cut.Cut.Axis == CutAxis.Theta).ToArray();
+        var through = cuts.Where(cut => cut.Cut.Axis == CutAxis.Theta).ToArray();
+        var usable = through.Where(cut => cut.HasEllipse).ToArray();
         if (usable.Length == 0)
         {
+            AxisPowerReducer.Reduce(through, method, context);
             return;
         }
 
         var frequencies = usable[0].Cut.FrequencyHz;
-        var (right, left) = (MeanAmplitude(usable, FieldComponent.Right, context.Run.AxisDeg), MeanAmplitude(usable, FieldComponent.Left, context.Run.AxisDeg));
+        var (right, left) = (AxisMean.Amplitude(usable, FieldComponent.Right, context.Run.AxisDeg), AxisMean.Amplitude(usable, FieldComponent.Left, context.Run.AxisDeg));
         if (right.All(double.IsNaN))
         {
             return;
@@ -78,7 +80,7 @@ public static class AxisReducer
             Add(level, Array.ConvertAll(left, Decibels.OfAmplitude), FieldComponent.Left, MeanFormula);
             Add(level, Array.ConvertAll(total, Decibels.OfAmplitude), FieldComponent.Total, MeanFormula);
             Add(QuantityCatalogue.AxialRatio, [.. right.Zip(left, PolarizationEllipse.AxialRatioDb)], FieldComponent.None, EllipseFigures.AxialRatioFormula);
-            var rightIsCo = intended is Hand.Right || (intended is null or Hand.Linear && right.Sum() >= left.Sum());
+            var rightIsCo = intended is Hand.Right || (intended is null or Hand.Linear && right.Where(double.IsFinite).Sum() >= left.Where(double.IsFinite).Sum());
             Add(QuantityCatalogue.CrossPolarRatio, [.. right.Zip(left, (r, l) => Decibels.OfAmplitude(rightIsCo ? r / l : l / r))], rightIsCo ? FieldComponent.Right : FieldComponent.Left, "20 lg of co-polar over cross-polar amplitude");
         }
 
@@ -127,27 +129,5 @@ public static class AxisReducer
                 });
             }
         }
-    }
-
-    private static double[] MeanAmplitude(ReducedCut[] cuts, FieldComponent component, double axisDeg)
-    {
-        var mean = new double[cuts[0].Cut.FrequencyHz.Length];
-        for (var i = 0; i < mean.Length; i++)
-        {
-            var (sum, count) = (0.0, 0);
-            foreach (var cut in cuts)
-            {
-                var amplitude = new CutSlice(cut, i).AmplitudeAt(component, axisDeg);
-                if (!double.IsNaN(amplitude))
-                {
-                    sum += amplitude * amplitude;
-                    count++;
-                }
-            }
-
-            mean[i] = count == 0 ? double.NaN : Math.Sqrt(sum / count);
-        }
-
-        return mean;
     }
 }

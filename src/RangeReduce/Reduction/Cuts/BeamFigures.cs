@@ -12,6 +12,9 @@ internal static class BeamFigures
     // Two maxima closer than this in level cannot be told apart on an ordinary range (common practice).
     private const double SameLevelDb = 0.1;
 
+    // Main beam and main lobe are refined from the same samples, so their directions agree to rounding.
+    private const double SameDirectionDeg = 1e-6;
+
     // A cut flatter than this is round: its maximum is noise and ripple.
     private const double RoundDb = 0.5;
 
@@ -41,33 +44,23 @@ internal static class BeamFigures
         }
 
         AddLobes(slice, keys, main, beam, lobes);
-        if (double.IsNaN(beam.BackDb))
-        {
-            keys.Context.Remarks.Add(RemarkSeverity.Note, "no-back", $"The front-to-back ratio is not given for {keys.Words}: the cut is not a closed turn.", keys.Source.State);
-        }
-        else if (beam.SpanDb >= RoundDb)
-        {
-            keys.Context.Table.Add(keys.Figure(QuantityCatalogue.FrontToBackRatio, slice.FrequencyHz, beam.PeakDb - beam.BackDb, "maximum less the level 180 degrees from it") with
-            {
-                Component = main,
-                DirectionDeg = beam.PeakDeg,
-            });
-        }
-
-        return Inside(slice.AngleDeg, beam.PeakDeg);
+        AddFrontToBack(slice, keys, main, beam);
+        return TurnedSpan.InTurn(slice.AngleDeg, beam.PeakDeg);
     }
 
     private static void AddPeak(CutSlice slice, CutKeys keys, FieldComponent main, Beam beam, IReadOnlyList<Lobe> lobes)
     {
-        var rival = lobes.Count(lobe => lobe.LevelDb > beam.PeakDb - SameLevelDb) > 1;
-        if (beam.SpanDb < RoundDb || rival)
+        var rival = Others(lobes, beam).Any(lobe => lobe.LevelDb > beam.PeakDb - SameLevelDb);
+        if (beam.SpanDb < RoundDb || rival || !beam.IsPeakSeen)
         {
-            var why = beam.SpanDb < RoundDb ? "the cut is round within 0.5 dB" : "two lobes are equal within 0.1 dB";
+            var why = beam.SpanDb < RoundDb ? "the cut is round within 0.5 dB"
+                : rival ? "two lobes are equal within 0.1 dB"
+                : "the highest level lies at the end of the data or beside a missing sample";
             keys.Context.Remarks.Add(RemarkSeverity.Note, "peak-not-unique", $"No direction of the maximum is given at some frequencies of {keys.Words}: {why}.", keys.Source.State);
             return;
         }
 
-        keys.Context.Table.Add(keys.Figure(QuantityCatalogue.PeakDirection, slice.FrequencyHz, beam.PeakDeg, "vertex of the parabola through the three highest levels in dB") with
+        keys.Context.Table.Add(keys.Figure(QuantityCatalogue.PeakDirection, slice.FrequencyHz, TurnedSpan.InTurn(slice.AngleDeg, beam.PeakDeg), "vertex of the parabola through the three highest levels in dB") with
         {
             Component = main,
             At = FigurePlace.Peak,
@@ -85,41 +78,66 @@ internal static class BeamFigures
         keys.Context.Table.Add(keys.Figure(QuantityCatalogue.HalfPowerBeamwidth, slice.FrequencyHz, beam.WidthDeg, WidthFormula) with
         {
             Component = main == FieldComponent.Total ? FieldComponent.None : main,
-            DirectionDeg = beam.PeakDeg,
+            DirectionDeg = TurnedSpan.InTurn(slice.AngleDeg, beam.PeakDeg),
         });
     }
 
     /// <summary>Adds the beamwidth of the stronger hand about its own maximum.</summary>
     private static void AddCircularWidth(CutSlice slice, CutKeys keys, Beam total)
     {
-        var inside = Inside(slice.AngleDeg, total.PeakDeg);
-        var component = slice.AmplitudeAt(FieldComponent.Right, inside) >= slice.AmplitudeAt(FieldComponent.Left, inside) ? FieldComponent.Right : FieldComponent.Left;
+        var component = slice.AmplitudeAt(FieldComponent.Right, total.PeakDeg) >= slice.AmplitudeAt(FieldComponent.Left, total.PeakDeg) ? FieldComponent.Right : FieldComponent.Left;
         if (Beam.TryFind(slice.AngleDeg, slice.LevelDb(component), out var beam) && !double.IsNaN(beam.WidthDeg))
         {
             keys.Context.Table.Add(keys.Figure(QuantityCatalogue.HalfPowerBeamwidth, slice.FrequencyHz, beam.WidthDeg, WidthFormula) with
             {
                 Component = component,
-                DirectionDeg = beam.PeakDeg,
+                DirectionDeg = TurnedSpan.InTurn(slice.AngleDeg, beam.PeakDeg),
             });
         }
     }
 
     private static void AddLobes(CutSlice slice, CutKeys keys, FieldComponent main, Beam beam, IReadOnlyList<Lobe> lobes)
     {
-        // The main lobe is the one at the highest sample; the rest are given as the highest before and the highest behind.
-        var others = lobes.Skip(1).Select(lobe => (Lobe: lobe, Back: DistanceDeg(lobe.AngleDeg, beam.PeakDeg) > 90.0)).ToArray();
+        // The highest in front and the highest behind.
+        var others = Others(lobes, beam).Select(lobe => (Lobe: lobe, Back: DistanceDeg(lobe.AngleDeg, beam.PeakDeg) > 90.0)).ToArray();
         var rank = 0;
         foreach (var (lobe, back) in others.GroupBy(other => other.Back).Select(group => group.First()).OrderByDescending(other => other.Lobe.LevelDb))
         {
             keys.Context.Table.Add(keys.Figure(QuantityCatalogue.SidelobeLevel, slice.FrequencyHz, lobe.LevelDb - beam.PeakDb, LobeFormula) with
             {
                 Component = main,
-                DirectionDeg = lobe.AngleDeg,
+                DirectionDeg = TurnedSpan.InTurn(slice.AngleDeg, lobe.AngleDeg),
                 Rank = ++rank,
                 BackLobe = back,
             });
         }
     }
+
+    private static void AddFrontToBack(CutSlice slice, CutKeys keys, FieldComponent main, Beam beam)
+    {
+        if (double.IsNaN(beam.BackDb))
+        {
+            var why = TurnedSpan.ClosesTurn(slice.AngleDeg) ? "the level 180 degrees from the maximum is missing at some frequencies" : "the cut is not a closed turn";
+            keys.Context.Remarks.Add(RemarkSeverity.Note, "no-back", $"The front-to-back ratio is not given for {keys.Words}: {why}.", keys.Source.State);
+            return;
+        }
+
+        if (beam.SpanDb < RoundDb)
+        {
+            return;
+        }
+
+        var ratio = beam.PeakDb - beam.BackDb;
+        keys.Context.Table.Add(keys.Figure(QuantityCatalogue.FrontToBackRatio, slice.FrequencyHz, double.IsFinite(ratio) ? ratio : double.NaN, "maximum less the level 180 degrees from it") with
+        {
+            Component = main,
+            DirectionDeg = TurnedSpan.InTurn(slice.AngleDeg, beam.PeakDeg),
+            Why = double.IsFinite(ratio) ? null : "the level 180 degrees from the maximum is exactly zero",
+        });
+    }
+
+    /// <summary>Gives all lobes but the main one, the highest first.</summary>
+    private static IEnumerable<Lobe> Others(IReadOnlyList<Lobe> lobes, Beam beam) => lobes.Where(lobe => DistanceDeg(lobe.AngleDeg, beam.PeakDeg) > SameDirectionDeg);
 
     /// <summary>Gives the level under which nothing is a lobe: 10 dB above the stated noise floor.</summary>
     private static double FloorDb(CutKeys keys, double peakDb)
@@ -132,11 +150,5 @@ internal static class BeamFigures
     {
         var distance = Math.Abs(first - second) % 360.0;
         return Math.Min(distance, 360.0 - distance);
-    }
-
-    public static double Inside(double[] angleDeg, double direction)
-    {
-        var turned = direction > angleDeg[^1] ? direction - 360.0 : direction < angleDeg[0] ? direction + 360.0 : direction;
-        return Math.Clamp(turned, angleDeg[0], angleDeg[^1]);
     }
 }

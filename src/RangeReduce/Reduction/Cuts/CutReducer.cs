@@ -77,7 +77,7 @@ public static class CutReducer
         }
 
         var axis = keys.Context.Run.AxisDeg;
-        if (cut.Cut.Axis == CutAxis.Theta && (axis < cut.Cut.AngleDeg[0] - 1e-6 || axis > cut.Cut.AngleDeg[^1] + 1e-6))
+        if (cut.Cut.Axis == CutAxis.Theta && !TurnedSpan.ClosesTurn(cut.Cut.AngleDeg) && (axis < cut.Cut.AngleDeg[0] - 1e-6 || axis > cut.Cut.AngleDeg[^1] + 1e-6))
         {
             Say("axis-outside", FormattableString.Invariant($"The axis at {axis:0.##} deg lies outside {keys.Words}, so it has no figures on the axis."));
         }

@@ -9,6 +9,7 @@ public sealed class ReflectionCurve
 {
     private readonly double[] _re;
     private readonly double[] _im;
+    private readonly double[] _power;
 
     /// <summary>Takes one port of a sweep.</summary>
     /// <param name="sweep">The sweep.</param>
@@ -19,10 +20,12 @@ public sealed class ReflectionCurve
         (FrequencyHz, HasPhase, ReferenceOhm) = (sweep.FrequencyHz, sweep.HasPhase, sweep.ReferenceOhm[port]);
         (_re, _im) = (new double[sweep.Count], new double[sweep.Count]);
         Magnitude = new double[sweep.Count];
+        _power = new double[sweep.Count];
         for (var i = 0; i < sweep.Count; i++)
         {
             var reflection = sweep[i, port, port];
             (_re[i], _im[i], Magnitude[i]) = (reflection.Real, reflection.Imaginary, reflection.Magnitude);
+            _power[i] = Magnitude[i] * Magnitude[i];
         }
     }
 
@@ -37,10 +40,11 @@ public sealed class ReflectionCurve
         ArgumentNullException.ThrowIfNull(re);
         ArgumentNullException.ThrowIfNull(im);
         (FrequencyHz, _re, _im, ReferenceOhm, HasPhase) = (frequencyHz, re, im, referenceOhm, true);
-        Magnitude = new double[frequencyHz.Length];
+        (Magnitude, _power) = (new double[frequencyHz.Length], new double[frequencyHz.Length]);
         for (var i = 0; i < Magnitude.Length; i++)
         {
-            Magnitude[i] = Math.Sqrt((re[i] * re[i]) + (im[i] * im[i]));
+            _power[i] = (re[i] * re[i]) + (im[i] * im[i]);
+            Magnitude[i] = Math.Sqrt(_power[i]);
         }
     }
 
@@ -62,11 +66,17 @@ public sealed class ReflectionCurve
     /// <summary>Gets the reference impedance in ohm.</summary>
     public double ReferenceOhm { get; }
 
+    /// <summary>Gives Γ at a sample; a real magnitude where there is no phase.</summary>
+    public Complex this[int sample] => HasPhase ? new Complex(_re[sample], _im[sample]) : Magnitude[sample];
+
     /// <summary>Gives Γ between a sample and the next one, by a cubic in real and imaginary part.</summary>
-    /// <remarks>Real and imaginary part are smooth through a resonance where |Γ| has a sharp dip and its decibels a pole. Where there is no phase, |Γ| itself is interpolated, as a real number.</remarks>
-    public Complex Between(int segment, double frequencyHz) => new(
-        LocalCubic.Interpolate(FrequencyHz, _re, segment, frequencyHz),
-        HasPhase ? LocalCubic.Interpolate(FrequencyHz, _im, segment, frequencyHz) : 0.0);
+    /// <remarks>
+    /// Real and imaginary part are smooth through a resonance where |Γ| has a sharp dip and its decibels a pole. Where there is no phase, |Γ|² is interpolated,
+    /// which is smooth too, and its root given as a real number: 0 where the cubic runs below zero, a dip deeper than the samples can tell.
+    /// </remarks>
+    public Complex Between(int segment, double frequencyHz) => HasPhase
+        ? new Complex(LocalCubic.Interpolate(FrequencyHz, _re, segment, frequencyHz), LocalCubic.Interpolate(FrequencyHz, _im, segment, frequencyHz))
+        : Math.Sqrt(Math.Max(0.0, LocalCubic.Interpolate(FrequencyHz, _power, segment, frequencyHz)));
 
     /// <summary>Gives |Γ| between a sample and the next one.</summary>
     public double MagnitudeBetween(int segment, double frequencyHz) => Between(segment, frequencyHz).Magnitude;

@@ -75,7 +75,10 @@ public static class ReflectionReducer
         {
             Quantity = quantity,
             Value = value,
-            Why = double.IsFinite(value) ? null : double.IsNaN(value) ? "|Γ| is above 1" : "the match is perfect to the last digit",
+            Why = double.IsFinite(value) ? null
+                : double.IsNaN(value) ? "|Γ| is above 1"
+                : curve.HasPhase ? "the match is perfect to the last digit"
+                : "the dip is deeper than samples without phase can tell",
             State = input.State,
             Source = input.Source,
             FrequencyHz = resonance.FrequencyHz,
@@ -88,11 +91,11 @@ public static class ReflectionReducer
 
     private static void AddBands(StateSweep input, ReflectionCurve curve, IReadOnlyList<Resonance> resonances, string? method, ReductionContext context)
     {
-        var bands = BandFinder.AtMost(curve.FrequencyHz, curve.Magnitude, Reflection.MagnitudeOfReturnLoss(MatchThresholdDb), curve.MagnitudeBetween);
+        var bands = MatchBandFinder.Find(curve, resonances, Reflection.MagnitudeOfReturnLoss(MatchThresholdDb));
 
-        // Rank 1 is the band of the deepest resonance; the others follow by their deepest sample.
+        // Rank 1 is the band of the deepest resonance; the others follow by how deep they go.
         var deepest = resonances.Count > 0 ? resonances[0].FrequencyHz : double.NaN;
-        var ranked = bands.OrderBy(band => band.Contains(deepest) ? 0 : 1).ThenBy(band => curve.Magnitude[band.First..(band.Last + 1)].Min()).ToArray();
+        var ranked = bands.OrderBy(band => band.Contains(deepest) ? 0 : 1).ThenBy(band => LeastMagnitude(curve, resonances, band)).ToArray();
         for (var rank = 1; rank <= ranked.Length; rank++)
         {
             var band = ranked[rank - 1];
@@ -123,6 +126,12 @@ public static class ReflectionReducer
             }
         }
     }
+
+    private static double LeastMagnitude(ReflectionCurve curve, IReadOnlyList<Resonance> resonances, Band band) => resonances
+        .Where(resonance => band.Contains(resonance.FrequencyHz))
+        .Select(resonance => resonance.Reflection.Magnitude)
+        .Concat(curve.Magnitude.Where((_, sample) => band.Contains(curve.FrequencyHz[sample])))
+        .Min();
 
     private static string OpenEnd(string open) => open switch
     {

@@ -42,8 +42,15 @@ public static class ResonanceFinder
             // The dip lies in one of the two segments beside the lowest sample: take the deeper of the two minima.
             var left = Bisection.Minimum(hertz => of.MagnitudeBetween(at - 1, hertz), frequency[at - 1], frequency[at]);
             var right = Bisection.Minimum(hertz => of.MagnitudeBetween(at, hertz), frequency[at], frequency[at + 1]);
-            var (atLeft, atRight) = (of.Between(at - 1, left), of.Between(at, right));
-            return atLeft.Magnitude <= atRight.Magnitude ? (left, atLeft) : (right, atRight);
+            // The search never meets the ends of its bracket, so a minimum that falls on the sample (a perfect match, say) is held against both.
+            ReadOnlySpan<(double Hertz, Complex Reflection)> candidates = [(frequency[at], of[at]), (left, of.Between(at - 1, left)), (right, of.Between(at, right))];
+            var best = candidates[0];
+            foreach (var candidate in candidates)
+            {
+                best = candidate.Reflection.Magnitude < best.Reflection.Magnitude ? candidate : best;
+            }
+
+            return best;
         }
     }
 

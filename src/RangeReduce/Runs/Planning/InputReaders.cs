@@ -10,7 +10,11 @@ internal sealed class InputReaders : IInputReaders
     /// <summary>All readers.</summary>
     public static readonly IInputReaders All = new InputReaders();
 
-    private static readonly string[] TableEndings = [".csv", ".tsv", ".txt", ".dat", ".asc", ".cut"];
+    // A file of these endings that is no table is an error worth saying; any other ending needs the look of one.
+    private static readonly string[] TableEndings = [".csv", ".tsv"];
+
+    // Numbers in rows are common in these too, but nobody writes measurements in them.
+    private static readonly string[] DocumentEndings = [".md", ".toml", ".json", ".html", ".nec", ".log", ".py", ".cs"];
 
     /// <inheritdoc/>
     public InputKind Recognise(string path, ReadOnlySpan<byte> head)
@@ -21,7 +25,7 @@ internal sealed class InputReaders : IInputReaders
             return InputKind.Sweep;
         }
 
-        return TableEndings.Contains(ending, StringComparer.OrdinalIgnoreCase) ? InputKind.Cut : InputKind.Other;
+        return TableEndings.Contains(ending, StringComparer.OrdinalIgnoreCase) || (!DocumentEndings.Contains(ending, StringComparer.OrdinalIgnoreCase) && TableReader.LooksLikeTable(head)) ? InputKind.Cut : InputKind.Other;
     }
 
     /// <inheritdoc/>
