@@ -1,0 +1,11 @@
+namespace RangeReduce.Reporting.Model;
+
+/// <summary>How the cells of a column stand under each other.</summary>
+public enum ColumnAlignment
+{
+    /// <summary>Flush left.</summary>
+    Left,
+
+    /// <summary>On the decimal point; words are centred on it.</summary>
+    DecimalPoint,
+}

@@ -1,0 +1,102 @@
+using RangeReduce.Reporting.Model;
+
+namespace RangeReduce.Reporting.Pdf;
+
+/// <summary>Gives the columns of a table their widths.</summary>
+internal static class TableMeasure
+{
+    /// <summary>Space between columns.</summary>
+    public const float Gap = 10f;
+
+    /// <summary>Room of the mark in the heading of a state's column.</summary>
+    public const float MarkRoom = 9f;
+
+    /// <summary>Measures a table.</summary>
+    /// <returns>The width of each column without the gap; with the gaps they fill the line.</returns>
+    public static float[] Widths(TableBlock table, float size, float width)
+    {
+        var count = table.Columns.Count;
+        var free = width - (Gap * (count - 1));
+        var (natural, least) = (new float[count], new float[count]);
+        for (var at = 0; at < count; at++)
+        {
+            var column = table.Columns[at];
+            var mark = column.State is null ? 0f : MarkRoom;
+            var cells = table.Rows.Select(row => row.Cells[at]).ToList();
+            natural[at] = Math.Max(mark + TextWrapper.Natural(column.Head, size), Widest(cells, column.Alignment, size)) + 0.5f;
+            least[at] = Math.Min(free / count * 1.4f, cells.Select(cell => TextWrapper.WidestWord(cell, size)).Append(mark + TextWrapper.WidestWord(column.Head, size)).Max() + 0.5f);
+        }
+
+        return natural.Sum() <= free ? Widen(natural, free) : Squeeze(natural, least, free);
+    }
+
+    /// <summary>Cuts a cell at its decimal point: what stands left of it and what follows; a word has no right part.</summary>
+    public static (string Left, string Right)? AtPoint(string text)
+    {
+        var digits = text.AsSpan().TrimStart(Formatting.NumberText.Minus);
+        if (digits.Length == 0 || !char.IsAsciiDigit(digits[0]))
+        {
+            return null;
+        }
+
+        var end = text.Length - digits.Length;
+        while (end < text.Length && char.IsAsciiDigit(text[end]))
+        {
+            end++;
+        }
+
+        return (text[..end], text[end..]);
+    }
+
+    private static float Widest(List<RichText> cells, ColumnAlignment alignment, float size)
+    {
+        var widest = cells.Select(cell => TextWrapper.Natural(cell, size)).DefaultIfEmpty(0f).Max();
+        if (alignment == ColumnAlignment.DecimalPoint)
+        {
+            var parts = cells.Select(cell => AtPoint(cell.Plain)).OfType<(string Left, string Right)>().ToList();
+            widest = parts.Count == 0 ? widest : Math.Max(widest, parts.Max(part => TextWrapper.Natural(part.Left, size)) + parts.Max(part => TextWrapper.Natural(part.Right, size)));
+        }
+
+        return widest;
+    }
+
+    // Spare room goes to all columns alike up to a point, and then to the last.
+    private static float[] Widen(float[] natural, float free)
+    {
+        var spare = free - natural.Sum();
+        var each = Math.Min(spare / natural.Length, 30f);
+        var widths = Array.ConvertAll(natural, width => width + each);
+        widths[^1] += spare - (each * natural.Length);
+        return widths;
+    }
+
+    // Columns that are narrow by nature keep their width; the others share what is left by their wish, and none gets less than its widest word.
+    private static float[] Squeeze(float[] natural, float[] least, float free)
+    {
+        var widths = new float[natural.Length];
+        var open = Enumerable.Range(0, natural.Length).ToList();
+        var left = free;
+        while (open.Count > 0)
+        {
+            var fair = left / open.Count;
+            var narrow = open.FindAll(at => natural[at] <= fair);
+            if (narrow.Count == 0)
+            {
+                break;
+            }
+
+            narrow.ForEach(at => widths[at] = natural[at]);
+            left -= narrow.Sum(at => natural[at]);
+            open.RemoveAll(narrow.Contains);
+        }
+
+        var wish = open.Sum(at => MathF.Sqrt(natural[at]));
+        var base_ = open.Sum(at => least[at]);
+        foreach (var at in open)
+        {
+            widths[at] = base_ <= left ? least[at] + ((left - base_) * MathF.Sqrt(natural[at]) / wish) : left * least[at] / base_;
+        }
+
+        return widths;
+    }
+}

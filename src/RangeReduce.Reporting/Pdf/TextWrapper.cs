@@ -1,0 +1,116 @@
+using RangeReduce.Reporting.Fonts;
+using RangeReduce.Reporting.Model;
+
+namespace RangeReduce.Reporting.Pdf;
+
+/// <summary>Breaks text into lines at spaces; a word wider than the line is broken between letters.</summary>
+internal static class TextWrapper
+{
+    /// <summary>Height of a line over the size of the letters.</summary>
+    public const float Leading = 1.32f;
+
+    /// <summary>Gives the face of a span.</summary>
+    public static TextFace FaceOf(TextSpan span) => span.Code ? TextFace.Mono : span.Strong ? TextFace.Bold : TextFace.Regular;
+
+    /// <summary>Gives the width of the text on one line.</summary>
+    public static float Natural(RichText text, float size) => text.Spans.Sum(span => TextMeter.Width(span.Text, FaceOf(span), size));
+
+    /// <summary>Gives the width of the widest word.</summary>
+    public static float WidestWord(RichText text, float size) =>
+        text.Spans.SelectMany(span => span.Text.Split(' ').Select(word => TextMeter.Width(word, FaceOf(span), size))).DefaultIfEmpty(0f).Max();
+
+    /// <summary>Breaks a text into lines.</summary>
+    public static IReadOnlyList<TextLine> Wrap(RichText text, float size, float width)
+    {
+        var lines = new List<TextLine>();
+        var line = new List<PlacedWord>();
+        var at = 0f;
+        foreach (var span in text.Spans)
+        {
+            var face = FaceOf(span);
+            foreach (var word in Words(span.Text))
+            {
+                var rest = word;
+                while (rest.Length > 0)
+                {
+                    var needed = TextMeter.Width(rest.TrimEnd(' '), face, size);
+                    if (at + needed <= width + 0.01f)
+                    {
+                        var whole = TextMeter.Width(rest, face, size);
+                        line.Add(new(rest, span, at, whole));
+                        at += whole;
+                        break;
+                    }
+
+                    if (at > 0f)
+                    {
+                        lines.Add(Ended(line));
+                        (line, at) = ([], 0f);
+                        continue;
+                    }
+
+                    var taken = LettersThatFit(rest, face, size, width);
+                    line.Add(new(rest[..taken], span, 0f, TextMeter.Width(rest[..taken], face, size)));
+                    lines.Add(Ended(line));
+                    (line, rest) = ([], rest[taken..]);
+                }
+            }
+        }
+
+        if (line.Count > 0)
+        {
+            lines.Add(Ended(line));
+        }
+
+        return lines;
+    }
+
+    // The pieces of one span are drawn as one string: the text of the page stays whole for a reader that copies or searches it.
+    private static TextLine Ended(List<PlacedWord> words)
+    {
+        var joined = new List<PlacedWord>();
+        foreach (var word in words)
+        {
+            if (joined.Count > 0 && ReferenceEquals(joined[^1].Span, word.Span))
+            {
+                joined[^1] = joined[^1] with { Text = joined[^1].Text + word.Text, Width = joined[^1].Width + word.Width };
+            }
+            else
+            {
+                joined.Add(word);
+            }
+        }
+
+        return new(joined);
+    }
+
+    // Each word keeps the spaces behind it.
+    private static IEnumerable<string> Words(string text)
+    {
+        var start = 0;
+        for (var at = 1; at < text.Length; at++)
+        {
+            if (text[at] != ' ' && text[at - 1] == ' ')
+            {
+                yield return text[start..at];
+                start = at;
+            }
+        }
+
+        if (start < text.Length)
+        {
+            yield return text[start..];
+        }
+    }
+
+    private static int LettersThatFit(string word, TextFace face, float size, float width)
+    {
+        var count = 1;
+        while (count < word.Length && TextMeter.Width(word[..(count + 1)], face, size) <= width)
+        {
+            count++;
+        }
+
+        return count;
+    }
+}

@@ -1,0 +1,28 @@
+namespace RangeReduce.Reporting.Tests;
+
+public sealed class LookTests(Xunit.Abstractions.ITestOutputHelper output)
+{
+    [Fact]
+    public void Whole_report_is_written_to_a_folder_for_the_eye()
+    {
+        // Set the variable to a folder to look at the report; without it the report only has to come out whole.
+        var wanted = Environment.GetEnvironmentVariable("RANGEREDUCE_LOOK");
+        var folder = wanted ?? Directory.CreateTempSubdirectory("report").FullName;
+        var watch = System.Diagnostics.Stopwatch.StartNew();
+        for (var turn = 0; turn < 2; turn++)
+        {
+            watch.Restart();
+            var model = ReportModelBuilder.Build(SyntheticRun.Make(), SyntheticRun.Options);
+            var built = watch.ElapsedMilliseconds;
+            using (var pdf = File.Create(Path.Combine(folder, "report.pdf")))
+            {
+                PdfReportWriter.Write(model, pdf);
+            }
+
+            var set = watch.ElapsedMilliseconds;
+            var names = PlotImageWriter.WritePng(model, Path.Combine(folder, "plots"));
+            output.WriteLine($"build {built} ms, pdf {set - built} ms, {names.Count} png {watch.ElapsedMilliseconds - set} ms");
+            Assert.All(names, name => Assert.True(new FileInfo(Path.Combine(folder, "plots", name)).Length > 2000));
+        }
+    }
+}
