@@ -1,6 +1,7 @@
 using System.CommandLine;
 using RangeReduce.Comparison;
 using RangeReduce.Diagnostics;
+using RangeReduce.Reporting;
 using RangeReduce.Reporting.Results;
 using RangeReduce.Runs;
 using RangeReduce.Uncertainties;
@@ -24,10 +25,11 @@ internal static class ReduceCommand
                 result.AddError("--trials takes a whole number from 100 to 1000000.");
             }
         });
+        var paper = new Option<PaperSize>("--paper") { Description = "Paper of the PDF: A4 or Letter.", DefaultValueFactory = _ => PaperSize.A4 };
         var timings = new Option<bool>("--timings") { Description = "Say on standard error how long each step took." };
-        var command = new Command("reduce", "Reduce a measurement folder to a report folder: report.pdf, report.html, results.json, figures.csv, traces, plots.") { folder, output, force, trials, timings };
+        var command = new Command("reduce", "Reduce a measurement folder to a report folder: report.pdf, report.html, results.json, figures.csv, traces, plots.") { folder, output, force, paper, trials, timings };
         command.SetAction(parsed => Run(
-            new(parsed.GetRequiredValue(folder), parsed.GetValue(output), parsed.GetValue(force), parsed.GetValue(trials), parsed.GetValue(timings), parsed.GetValue(CommonOptions.Json), parsed.GetValue(CommonOptions.Quiet)),
+            new(parsed.GetRequiredValue(folder), parsed.GetValue(output), parsed.GetValue(force), parsed.GetValue(trials), parsed.GetValue(paper), parsed.GetValue(timings), parsed.GetValue(CommonOptions.Json), parsed.GetValue(CommonOptions.Quiet)),
             terminal,
             clock,
             cancellationToken));
@@ -47,7 +49,7 @@ internal static class ReduceCommand
             var result = watch.Time("reducing", () => RunReduction.Reduce(run, new() { Trials = request.Trials }, new DirectProgress(share => report("reducing", 0.4 + (0.2 * share))), cancellationToken));
             report("writing", 0.7);
             var stamp = new ReportStamp(clock.GetUtcNow(), ToolVersion.Text, watch.TotalSeconds);
-            watch.Time("writing", () => ReportFolderWriter.Write(result, stamp, target, request.Force));
+            watch.Time("writing", () => ReportFolderWriter.Write(result, stamp, request.Paper, target, request.Force, step => report($"writing {step}", 0.75), cancellationToken));
             return result;
         });
 
@@ -76,5 +78,5 @@ internal static class ReduceCommand
             : ExitCode.Done;
     }
 
-    private sealed record Request(string Folder, string? Output, bool Force, int Trials, bool Timings, bool Json, bool Quiet);
+    private sealed record Request(string Folder, string? Output, bool Force, int Trials, PaperSize Paper, bool Timings, bool Json, bool Quiet);
 }

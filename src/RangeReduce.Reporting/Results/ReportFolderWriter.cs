@@ -1,3 +1,4 @@
+
 namespace RangeReduce.Reporting.Results;
 
 /// <summary>Writes everything that a reduction gives into one folder, whole or not at all.</summary>
@@ -6,20 +7,47 @@ public static class ReportFolderWriter
     /// <summary>Writes the folder.</summary>
     /// <param name="reduced">The reduced run.</param>
     /// <param name="stamp">Time and version.</param>
+    /// <param name="paper">Paper of the PDF.</param>
     /// <param name="folder">Where the folder is to stand.</param>
     /// <param name="overwrite">Whether a report that stands there may be replaced.</param>
+    /// <param name="step">Told each step as it begins: <c>results</c>, <c>plots</c>, <c>pdf</c>, <c>html</c>; may be null.</param>
+    /// <param name="cancellationToken">Stops the work between two steps; nothing is left behind then.</param>
     /// <exception cref="IOException">Something stands there and may not be replaced, or the disk failed.</exception>
     /// <exception cref="UnauthorizedAccessException">The place may not be written.</exception>
-    public static void Write(ReducedRun reduced, ReportStamp stamp, string folder, bool overwrite) => OutputFolder.Build(folder, overwrite, target =>
+    /// <exception cref="OperationCanceledException">The work was stopped.</exception>
+    public static void Write(ReducedRun reduced, ReportStamp stamp, PaperSize paper, string folder, bool overwrite, Action<string>? step = null, CancellationToken cancellationToken = default)
     {
-        Write(Path.Combine(target, "results.json"), stream => ResultsJsonWriter.Write(reduced, stamp, stream));
-        Write(Path.Combine(target, "figures.csv"), stream => FiguresCsvWriter.Write(reduced.Table, stream));
-        TraceCsvWriter.Write(reduced.Table, Directory.CreateDirectory(Path.Combine(target, "traces")).FullName);
-    });
+        ArgumentNullException.ThrowIfNull(stamp);
+        OutputFolder.Build(folder, overwrite, target =>
+        {
+            // Results and plots do not need each other: one core writes text while the other draws.
+            Begin("results");
+            var model = ReportModelBuilder.Build(reduced, new() { Made = stamp.At, Version = stamp.Version, Paper = paper });
+            var plots = Directory.CreateDirectory(Path.Combine(target, "plots")).FullName;
+            Parallel.Invoke(
+                () =>
+                {
+                    WriteFile("results.json", stream => ResultsJsonWriter.Write(reduced, stamp, stream));
+                    WriteFile("figures.csv", stream => FiguresCsvWriter.Write(reduced.Table, stream));
+                    TraceCsvWriter.Write(reduced.Table, Directory.CreateDirectory(Path.Combine(target, "traces")).FullName);
+                },
+                () => WriteFile("report.pdf", stream => PdfReportWriter.Write(model, stream)));
+            Begin("plots");
+            PlotImageWriter.WritePng(model, plots);
+            cancellationToken.ThrowIfCancellationRequested();
 
-    private static void Write(string path, Action<Stream> write)
-    {
-        using var stream = new FileStream(path, FileMode.CreateNew, FileAccess.ReadWrite, FileShare.None, 1 << 16);
-        write(stream);
+            void WriteFile(string name, Action<Stream> write)
+            {
+                cancellationToken.ThrowIfCancellationRequested();
+                using var stream = new FileStream(Path.Combine(target, name), FileMode.CreateNew, FileAccess.ReadWrite, FileShare.None, 1 << 16);
+                write(stream);
+            }
+
+            void Begin(string name)
+            {
+                cancellationToken.ThrowIfCancellationRequested();
+                step?.Invoke(name);
+            }
+        });
     }
 }
