@@ -24,6 +24,7 @@ internal sealed class CutTrial
     private readonly bool _hasPhase;
     private readonly double _axisDeg;
     private readonly double _peakAmplitude;
+    private readonly double _noiseReference;
     private readonly double _frontLobeDeg;
     private readonly double _backLobeDeg;
     private readonly bool _rightIsCo;
@@ -44,8 +45,9 @@ internal sealed class CutTrial
     /// <param name="axisDeg">Direction of the axis in degrees.</param>
     /// <param name="frontLobeDeg">Direction of the highest lobe within 90 degrees of the peak; NaN for none.</param>
     /// <param name="backLobeDeg">Direction of the highest lobe behind; NaN for none.</param>
+    /// <param name="noiseReference">Amplitude that the noise floor is stated against: the peak of the strongest cut taken in the same way.</param>
     /// <param name="intended">Hand that the cross-polar ratio takes as co-polar; else the stronger one on the axis.</param>
-    public CutTrial(ReducedCut cut, int frequency, double axisDeg, double frontLobeDeg, double backLobeDeg, Hand? intended)
+    public CutTrial(ReducedCut cut, int frequency, double axisDeg, double frontLobeDeg, double backLobeDeg, double noiseReference, Hand? intended)
     {
         var (first, second) = (cut.Cut.First!, cut.Cut.Second!);
         _angleDeg = cut.Cut.AngleDeg;
@@ -62,7 +64,7 @@ internal sealed class CutTrial
         _noise = new double[4 * _padded];
         _isLinear = cut.Cut.Basis == PolarizationBasis.ThetaPhi;
         _hasPhase = cut.Cut.IsComplex;
-        (_axisDeg, _frontLobeDeg, _backLobeDeg) = (axisDeg, frontLobeDeg, backLobeDeg);
+        (_axisDeg, _frontLobeDeg, _backLobeDeg, _noiseReference) = (axisDeg, frontLobeDeg, backLobeDeg, noiseReference);
         (_rightRe, _rightIm, _leftRe, _leftIm) = (new double[_padded], new double[_padded], new double[_padded], new double[_padded]);
         (_total, _right, _left, _quotient) = (new double[_padded], new double[_padded], new double[_padded], new double[n]);
         for (var i = 0; i < n; i++)
@@ -113,7 +115,7 @@ internal sealed class CutTrial
         var n = _angleDeg.Length;
         if (errors.Noise > 0.0)
         {
-            var noise = errors.Noise * _peakAmplitude * InverseRootTwo;
+            var noise = errors.Noise * _noiseReference * InverseRootTwo;
             for (var i = 0; i < _noise.Length; i++)
             {
                 _noise[i] = noise * random.TableNormal();

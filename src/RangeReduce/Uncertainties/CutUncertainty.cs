@@ -187,6 +187,11 @@ internal sealed class CutUncertainty
         return OfQuotientEnds(figure, quotient.Low, quotient.High, budget, Shares(index, slope));
     }
 
-    private UncertaintyShare[] Shares(int slot, double slope) =>
-        [.. _terms.Select(term => new UncertaintyShare(term.Term, term.Spread[slot] * slope)).Where(share => share.Contribution > 0.0 && double.IsFinite(share.Contribution))];
+    /// <summary>Gives the terms that matter: one that brings less than a hundredth of the largest changes no digit that is printed.</summary>
+    private UncertaintyShare[] Shares(int slot, double slope)
+    {
+        var shares = _terms.Select(term => new UncertaintyShare(term.Term, term.Spread[slot] * slope)).Where(share => double.IsFinite(share.Contribution)).ToArray();
+        var least = shares.Length == 0 ? 0.0 : 0.01 * shares.Max(share => share.Contribution);
+        return [.. shares.Where(share => share.Contribution > least)];
+    }
 }

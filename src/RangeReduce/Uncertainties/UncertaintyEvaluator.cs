@@ -65,6 +65,7 @@ public static class UncertaintyEvaluator
         foreach (var source in run.Cuts.Where(cut => cut.Source == DataSource.Measured && cut.Cut is { First: not null, Second: not null }))
         {
             var cut = ReducedCut.Of(source);
+            var noiseReference = NoiseReference.AmplitudeOf(run, source);
             for (var i = 0; i < source.Cut.FrequencyHz.Length; i++)
             {
                 var (index, hertz) = (i, source.Cut.FrequencyHz[i]);
@@ -75,17 +76,17 @@ public static class UncertaintyEvaluator
                 var figures = axis.Length > 0 && axisOwners.Add((source.State, hertz, axis[0].Method)) ? [.. own, .. axis] : own;
                 if (figures.Length > 0)
                 {
-                    yield return () => Job(cut, index, figures);
+                    yield return () => Job(cut, index, noiseReference, figures);
                 }
             }
         }
 
-        IEnumerable<(string, Uncertainty)> Job(ReducedCut cut, int index, Figure[] figures)
+        IEnumerable<(string, Uncertainty)> Job(ReducedCut cut, int index, double noiseReference, Figure[] figures)
         {
             var state = run.States.FirstOrDefault(state => string.Equals(state.Name, cut.Source.State, StringComparison.Ordinal));
             var front = figures.FirstOrDefault(figure => figure.Quantity == QuantityCatalogue.SidelobeLevel && figure.BackLobe is false)?.DirectionDeg ?? double.NaN;
             var back = figures.FirstOrDefault(figure => figure.Quantity == QuantityCatalogue.SidelobeLevel && figure.BackLobe is true)?.DirectionDeg ?? double.NaN;
-            var trial = new CutTrial(cut, index, run.AxisDeg, front, back, state?.IntendedHand);
+            var trial = new CutTrial(cut, index, run.AxisDeg, front, back, noiseReference, state?.IntendedHand);
             var result = CutUncertainty.Run(trial, terms, trials, Seed(cut.Source.InputIds[0], cut.Cut.FixedDeg, index));
             foreach (var figure in figures)
             {

@@ -34,8 +34,8 @@ internal static class BeamFigures
             return double.NaN;
         }
 
-        var floorDb = FloorDb(keys, beam.PeakDb);
-        var lobes = LobeFinder.Find(slice.AngleDeg, level, floorDb: floorDb);
+        // Within 10 dB of the noise floor a maximum is noise as like as not.
+        var lobes = LobeFinder.Find(slice.AngleDeg, level, floorDb: keys.NoiseFloorDb + 10.0);
         AddPeak(slice, keys, main, beam, lobes);
         AddWidth(slice, keys, main, beam);
         if (cut.HasEllipse && main == FieldComponent.Total)
@@ -138,13 +138,6 @@ internal static class BeamFigures
 
     /// <summary>Gives all lobes but the main one, the highest first.</summary>
     private static IEnumerable<Lobe> Others(IReadOnlyList<Lobe> lobes, Beam beam) => lobes.Where(lobe => DistanceDeg(lobe.AngleDeg, beam.PeakDeg) > SameDirectionDeg);
-
-    /// <summary>Gives the level under which nothing is a lobe: 10 dB above the stated noise floor.</summary>
-    private static double FloorDb(CutKeys keys, double peakDb)
-    {
-        var term = keys.Source.Source == DataSource.Measured ? keys.Context.Run.UncertaintyTerms.FirstOrDefault(term => term.Name is "noise-floor") : null;
-        return term is null ? double.NegativeInfinity : peakDb - Math.Abs(term.Value) + 10.0;
-    }
 
     private static double DistanceDeg(double first, double second)
     {

@@ -16,6 +16,9 @@ internal sealed class CutKeys(StateCut source, string? method, ReductionContext 
     /// <summary>Gets the run and its table.</summary>
     public ReductionContext Context { get; } = context;
 
+    /// <summary>Gets the stated noise floor in the decibels of the cut; −∞ where none is stated.</summary>
+    public double NoiseFloorDb { get; } = NoiseReference.FloorDb(context.Run, source);
+
     /// <summary>Gives <c>gain</c> where 0 dB is an isotropic radiator, else <c>level</c>.</summary>
     public Quantity LevelQuantity => LevelQuantityOf(Source);
 

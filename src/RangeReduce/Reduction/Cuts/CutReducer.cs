@@ -1,4 +1,5 @@
 using RangeReduce.Diagnostics;
+using RangeReduce.Numerics;
 using RangeReduce.Patterns;
 using RangeReduce.Quantities;
 using RangeReduce.Runs;
@@ -8,6 +9,9 @@ namespace RangeReduce.Reduction.Cuts;
 /// <summary>Makes the figures and traces of one cut at each of its frequencies.</summary>
 public static class CutReducer
 {
+    // A cut whose peak is nearer to the noise than this has no figure that noise does not touch (noise alone then moves a level by 0.3 dB and more).
+    private const double NearNoiseDb = 30.0;
+
     /// <summary>Reduces one cut into the context's table.</summary>
     /// <param name="source">The cut.</param>
     /// <param name="method">The method, where the same state has cuts by more than one kind of probe; else null.</param>
@@ -76,6 +80,12 @@ public static class CutReducer
             Say("no-phase", $"In {keys.Words} the two circular components have levels without phase: axial ratio and hand are given, tilt and linear components cannot be known.");
         }
 
+        var peakDb = PeakDb(cut);
+        if (peakDb - keys.NoiseFloorDb < NearNoiseDb)
+        {
+            Say("near-noise", FormattableString.Invariant($"The strongest sample of {keys.Words} lies only {peakDb - keys.NoiseFloorDb:0} dB above the stated noise floor: its shape and its polarization are those of the noise in part."));
+        }
+
         var axis = keys.Context.Run.AxisDeg;
         if (cut.Cut.Axis == CutAxis.Theta && !TurnedSpan.ClosesTurn(cut.Cut.AngleDeg) && (axis < cut.Cut.AngleDeg[0] - 1e-6 || axis > cut.Cut.AngleDeg[^1] + 1e-6))
         {
@@ -83,5 +93,19 @@ public static class CutReducer
         }
 
         void Say(string code, string text) => keys.Context.Remarks.Add(RemarkSeverity.Doubt, code, text, keys.Source.State, place);
+    }
+
+    private static double PeakDb(ReducedCut cut)
+    {
+        var strongest = 0.0;
+        foreach (var channel in new[] { cut.Cut.First, cut.Cut.Second })
+        {
+            for (var i = 0; i < (channel?.Re.Length ?? 0); i++)
+            {
+                strongest = channel!.Power(i) > strongest ? channel.Power(i) : strongest;
+            }
+        }
+
+        return Decibels.OfPower(strongest);
     }
 }
