@@ -90,11 +90,11 @@ internal static class TableMeasure
             open.RemoveAll(narrow.Contains);
         }
 
-        var wish = open.Sum(at => MathF.Sqrt(natural[at]));
-        var base_ = open.Sum(at => least[at]);
+        var floor = open.Sum(at => least[at]);
+        var wish = Math.Max(1f, open.Sum(at => natural[at] - least[at]));
         foreach (var at in open)
         {
-            widths[at] = base_ <= left ? least[at] + ((left - base_) * MathF.Sqrt(natural[at]) / wish) : left * least[at] / base_;
+            widths[at] = floor <= left ? least[at] + ((left - floor) * (natural[at] - least[at]) / wish) : left * least[at] / floor;
         }
 
         return widths;

@@ -29,7 +29,7 @@ internal static class DifferencePlot
         plot.Axes.Add(upper);
         plot.Axes.Add(lower);
         PlotFrame.AddCurves(plot, curves);
-        PlotFrame.AddCurves(plot, [difference with { Color = PlotPalette.Quiet, Marker = MarkerType.None, Thickness = 1.0 }], DifferenceKey);
+        PlotFrame.AddCurves(plot, [difference with { Name = string.Empty, Color = PlotPalette.Quiet, Marker = MarkerType.None, Thickness = 1.0 }], DifferenceKey);
         PlotFrame.AddLegend(plot, LegendEntry.Sources);
         return plot;
     }

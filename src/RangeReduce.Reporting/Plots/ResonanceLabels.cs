@@ -50,14 +50,13 @@ internal static class ResonanceLabels
             {
                 HorizontalAlignment.Left => new ScreenVector(4, 3),
                 HorizontalAlignment.Right => new ScreenVector(-4, 3),
-                _ => new ScreenVector(0, 6),
+                // A shallow dip lies among flat curves: its label goes well below them.
+                _ => new ScreenVector(0, mark.Y < 8.0 ? 13 : 5),
             },
             TextHorizontalAlignment = side,
             TextVerticalAlignment = VerticalAlignment.Top,
             FontSize = PlotFrame.FontSize - 0.5,
             TextColor = PlotPalette.Ink,
-            Background = PlotPalette.Paper,
-            Padding = new OxyThickness(1, 0, 1, 0),
             StrokeThickness = 0,
             XAxisKey = PlotFrame.XKey,
             YAxisKey = PlotFrame.YKey,

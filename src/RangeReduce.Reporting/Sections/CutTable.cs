@@ -45,8 +45,8 @@ internal static class CutTable
             new(QuantityCatalogue.HalfPowerBeamwidth, "Half-power beamwidth", null, null),
             new(QuantityCatalogue.SidelobeLevel, "Sidelobe level", null, null),
             new(QuantityCatalogue.FrontToBackRatio, "Front-to-back ratio", null, null),
-            new(QuantityCatalogue.AxialRatio, "Axial ratio on the axis", FigurePlace.Axis, null),
-            new(QuantityCatalogue.CrossPolarRatio, "Cross-polar ratio on the axis", FigurePlace.Axis, null),
+            new(QuantityCatalogue.AxialRatio, "Axial ratio on axis", FigurePlace.Axis, null),
+            new(QuantityCatalogue.CrossPolarRatio, "Cross-polar ratio on axis", FigurePlace.Axis, null),
             new(QuantityCatalogue.AxialRatioBeamwidth, "Axial-ratio beamwidth", null, null),
         };
         return wanted
