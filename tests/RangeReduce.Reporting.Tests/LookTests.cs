@@ -9,7 +9,7 @@ public sealed class LookTests(Xunit.Abstractions.ITestOutputHelper output)
         var wanted = Environment.GetEnvironmentVariable("RANGEREDUCE_LOOK");
         var folder = wanted ?? Directory.CreateTempSubdirectory("report").FullName;
         var watch = System.Diagnostics.Stopwatch.StartNew();
-        for (var turn = 0; turn < 2; turn++)
+        for (var turn = 0; turn < 3; turn++)
         {
             watch.Restart();
             var model = ReportModelBuilder.Build(SyntheticRun.Make(), SyntheticRun.Options);
@@ -19,9 +19,15 @@ public sealed class LookTests(Xunit.Abstractions.ITestOutputHelper output)
                 PdfReportWriter.Write(model, pdf);
             }
 
+            var pdfDone = watch.ElapsedMilliseconds;
+            using (var html = File.Create(Path.Combine(folder, "report.html")))
+            {
+                HtmlReportWriter.Write(model, html);
+            }
+
             var set = watch.ElapsedMilliseconds;
             var names = PlotImageWriter.WritePng(model, Path.Combine(folder, "plots"));
-            output.WriteLine($"build {built} ms, pdf {set - built} ms, {names.Count} png {watch.ElapsedMilliseconds - set} ms");
+            output.WriteLine($"build {built} ms, pdf {pdfDone - built} ms, html {set - pdfDone} ms, {names.Count} png {watch.ElapsedMilliseconds - set} ms, processor {System.Diagnostics.Process.GetCurrentProcess().TotalProcessorTime.TotalMilliseconds:F0} ms");
             Assert.All(names, name => Assert.True(new FileInfo(Path.Combine(folder, "plots", name)).Length > 2000));
         }
     }

@@ -109,7 +109,7 @@ internal static class SyntheticPattern
         var level = state is "stowed" ? 0.05 : 2.45 - (0.4 * Math.Abs(frequency - 1.62e9) / 0.1e9);
         var turn = Complex.Exp(new Complex(0.0, double.DegreesToRadians((2.0 * phi) + (angle * 1.3))));
         var leak = 0.09 + (2.2e-9 * Math.Abs(frequency - 1.614e9) * 0.5) + (0.55 * Math.Pow(Math.Abs(Math.Sin(half)), 2.0));
-        var noise = source == DataSource.Measured ? 0.012 * Math.Cos((angle * 0.9) + phi + (frequency * 1e-8)) : 0.0;
+        var noise = source == DataSource.Measured ? 0.012 * Math.Cos((angle * 0.21) + phi + (frequency * 1e-8)) : 0.0;
         var (co, cross) = (new Complex(level * (beam + noise), 0.0), level * ((leak * (beam + 0.03)) + Math.Abs(noise)) * turn);
         return state is "left" ? (cross, co) : (co, cross);
     }

@@ -1,3 +1,5 @@
+using System.Collections.Concurrent;
+
 using SkiaSharp;
 
 namespace RangeReduce.Reporting.Fonts;
@@ -6,6 +8,9 @@ namespace RangeReduce.Reporting.Fonts;
 internal static class TextMeter
 {
     private const float ReferenceSize = 100f;
+    private const int MostRemembered = 20_000;
+
+    private static readonly ConcurrentDictionary<(string Text, TextFace Face), float> Remembered = new();
 
     /// <summary>Height from the baseline to the top of a line over the size.</summary>
     public const float Ascent = 0.93f;
@@ -21,8 +26,18 @@ internal static class TextMeter
             return 0f;
         }
 
-        using var font = Font(face, ReferenceSize);
-        return font.MeasureText(text) * size / ReferenceSize;
+        // Labels, heads and words come again and again, and asking the native library for each costs more than the look-up.
+        if (!Remembered.TryGetValue((text, face), out var width))
+        {
+            using var font = Font(face, ReferenceSize);
+            width = font.MeasureText(text);
+            if (Remembered.Count < MostRemembered)
+            {
+                Remembered.TryAdd((text, face), width);
+            }
+        }
+
+        return width * size / ReferenceSize;
     }
 
     /// <summary>Makes a font for drawing; the caller disposes it.</summary>

@@ -7,7 +7,15 @@ public static class FrequencyText
     public static string WithUnit(double frequencyHz)
     {
         var (unit, factor) = UnitFor(frequencyHz);
-        return UnitText.Join(NumberText.Trimmed(frequencyHz * factor, 6), unit);
+        return UnitText.Join(Digits(frequencyHz * factor), unit);
+    }
+
+    /// <summary>Prints a number of hertz, megahertz and so on with two decimals at least and six at most.</summary>
+    public static string Digits(double value)
+    {
+        var trimmed = NumberText.Trimmed(value, 6);
+        var least = NumberText.Fixed(value, 2);
+        return trimmed.Length > least.Length ? trimmed : least;
     }
 
     /// <summary>Prints a frequency rounded to about five significant digits, for a label in a plot.</summary>

@@ -6,6 +6,6 @@ public enum ColumnAlignment
     /// <summary>Flush left.</summary>
     Left,
 
-    /// <summary>On the decimal point; words are centred on it.</summary>
+    /// <summary>On the decimal point; words start at its last digit.</summary>
     DecimalPoint,
 }

@@ -7,5 +7,5 @@ namespace RangeReduce.Reporting.Model;
 public sealed record ReportSection(string Id, string Title, IReadOnlyList<ReportBlock> Blocks)
 {
     /// <summary>Gets whether the section starts a page in print.</summary>
-    public bool StartsPage { get; init; } = true;
+    public bool StartsPage { get; init; }
 }

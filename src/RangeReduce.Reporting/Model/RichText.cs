@@ -19,6 +19,9 @@ public sealed record RichText(IReadOnlyList<TextSpan> Spans)
     /// <summary>Makes stressed text.</summary>
     public static RichText Strong(string text) => new([new TextSpan(text) { Strong = true }]);
 
+    /// <summary>Stresses the whole text.</summary>
+    public RichText AsStrong() => new([.. Spans.Select(span => span with { Strong = true })]);
+
     /// <summary>Makes quiet text.</summary>
     public static RichText Quiet(string text) => new([new TextSpan(text) { Tone = TextTone.Quiet }]);
 

@@ -31,7 +31,7 @@ internal sealed class BlockPieces(float width, StateStyles styles)
             pieces.Add(new TextPiece(RichText.Strong(title), 13.5f, width)
             {
                 KeepWithNext = true,
-                SpaceBefore = 16f,
+                SpaceBefore = 22f,
                 StartsPage = number > 1 && section.StartsPage,
                 Anchor = section.Id,
                 Bookmark = new Bookmark(title, 1, section.Id),
@@ -90,7 +90,7 @@ internal sealed class BlockPieces(float width, StateStyles styles)
         }
 
         var layout = new TableLayout(table, width, styles);
-        var head = new TableRowPiece(layout, [.. table.Columns.Select(column => Strong(column.Head))], isHead: true, startsGroup: false) { KeepWithNext = true, SpaceBefore = 2f };
+        var head = new TableRowPiece(layout, [.. table.Columns.Select(column => column.Head.AsStrong())], isHead: true, startsGroup: false) { KeepWithNext = true, SpaceBefore = 2f };
         pieces.Add(head);
         for (var at = 0; at < table.Rows.Count; at++)
         {
@@ -113,6 +113,4 @@ internal sealed class BlockPieces(float width, StateStyles styles)
     }
 
     private (MarkerType Marker, OxyColor Color)? MarkOf(string? state) => state is null ? null : (styles.MarkerOf(state), styles.ColorOf(state));
-
-    private static RichText Strong(RichText text) => new([.. text.Spans.Select(span => span with { Strong = true })]);
 }

@@ -22,7 +22,7 @@ internal sealed class PageBrush(SKCanvas canvas, IReadOnlySet<string> anchors) :
     {
         foreach (var word in line.Words)
         {
-            DrawText(word.Text, TextWrapper.FaceOf(word.Span), size, x + word.X, baseline, ColorOf(word.Span));
+            DrawText(word.Text, TextWrapper.FaceOf(word.Span), TextWrapper.SizeOf(word.Span, size), x + word.X, baseline, ColorOf(word.Span));
             if (word.Span.LinkTo is { } anchor && anchors.Contains(anchor))
             {
                 Link(anchor, new SKRect(x + word.X, baseline - (size * TextMeter.Ascent), x + word.X + word.Width, baseline + (size * TextMeter.Descent)));

@@ -48,7 +48,7 @@ internal sealed class TableLayout
         var text = string.Concat(line.Words.Select(word => word.Text));
         return TableMeasure.AtPoint(text) is { } parts
             ? Math.Max(0f, _points[column] - TextMeter.Width(parts.Left, TextWrapper.FaceOf(line.Words[0].Span), Size))
-            : 0f;
+            : Math.Clamp(_points[column] - TextMeter.Width("0", TextFace.Regular, Size), 0f, Math.Max(0f, Widths[column] - line.Width));
     }
 
     private static TextFace FaceAt(RichText text) => text.Spans.Count == 0 ? TextFace.Regular : TextWrapper.FaceOf(text.Spans[0]);

@@ -23,8 +23,8 @@ internal static class TableMeasure
             var column = table.Columns[at];
             var mark = column.State is null ? 0f : MarkRoom;
             var cells = table.Rows.Select(row => row.Cells[at]).ToList();
-            natural[at] = Math.Max(mark + TextWrapper.Natural(column.Head, size), Widest(cells, column.Alignment, size)) + 0.5f;
-            least[at] = Math.Min(free / count * 1.4f, cells.Select(cell => TextWrapper.WidestWord(cell, size)).Append(mark + TextWrapper.WidestWord(column.Head, size)).Max() + 0.5f);
+            natural[at] = Math.Max(mark + TextWrapper.Natural(column.Head.AsStrong(), size), Widest(cells, column.Alignment, size)) + 0.5f;
+            least[at] = Math.Min(Math.Max(free * 0.31f, free / count), cells.Select(cell => TextWrapper.WidestWord(cell, size)).Append(mark + TextWrapper.WidestWord(column.Head.AsStrong(), size)).Max() + 0.5f);
         }
 
         return natural.Sum() <= free ? Widen(natural, free) : Squeeze(natural, least, free);
@@ -90,11 +90,11 @@ internal static class TableMeasure
             open.RemoveAll(narrow.Contains);
         }
 
-        var wish = open.Sum(at => MathF.Sqrt(natural[at]));
-        var base_ = open.Sum(at => least[at]);
+        var floor = open.Sum(at => least[at]);
+        var wish = Math.Max(1f, open.Sum(at => natural[at] - least[at]));
         foreach (var at in open)
         {
-            widths[at] = base_ <= left ? least[at] + ((left - base_) * MathF.Sqrt(natural[at]) / wish) : left * least[at] / base_;
+            widths[at] = floor <= left ? least[at] + ((left - floor) * (natural[at] - least[at]) / wish) : left * least[at] / floor;
         }
 
         return widths;

@@ -3,7 +3,7 @@ using RangeReduce.Reporting.Model;
 
 namespace RangeReduce.Reporting.Pdf;
 
-/// <summary>Breaks text into lines at spaces; a word wider than the line is broken between letters.</summary>
+/// <summary>Breaks text into lines at spaces and behind hyphens; a word wider than the line is broken between letters.</summary>
 internal static class TextWrapper
 {
     /// <summary>Height of a line over the size of the letters.</summary>
@@ -12,12 +12,15 @@ internal static class TextWrapper
     /// <summary>Gives the face of a span.</summary>
     public static TextFace FaceOf(TextSpan span) => span.Code ? TextFace.Mono : span.Strong ? TextFace.Bold : TextFace.Regular;
 
+    /// <summary>Gives the size of a span: letters of equal width look large beside the others and are set smaller.</summary>
+    public static float SizeOf(TextSpan span, float size) => span.Code ? 0.86f * size : size;
+
     /// <summary>Gives the width of the text on one line.</summary>
-    public static float Natural(RichText text, float size) => text.Spans.Sum(span => TextMeter.Width(span.Text, FaceOf(span), size));
+    public static float Natural(RichText text, float size) => text.Spans.Sum(span => TextMeter.Width(span.Text, FaceOf(span), SizeOf(span, size)));
 
     /// <summary>Gives the width of the widest word.</summary>
     public static float WidestWord(RichText text, float size) =>
-        text.Spans.SelectMany(span => span.Text.Split(' ').Select(word => TextMeter.Width(word, FaceOf(span), size))).DefaultIfEmpty(0f).Max();
+        text.Spans.SelectMany(span => Words(span.Text).Select(word => TextMeter.Width(word.TrimEnd(' '), FaceOf(span), SizeOf(span, size)))).DefaultIfEmpty(0f).Max();
 
     /// <summary>Breaks a text into lines.</summary>
     public static IReadOnlyList<TextLine> Wrap(RichText text, float size, float width)
@@ -27,16 +30,16 @@ internal static class TextWrapper
         var at = 0f;
         foreach (var span in text.Spans)
         {
-            var face = FaceOf(span);
+            var (face, own) = (FaceOf(span), SizeOf(span, size));
             foreach (var word in Words(span.Text))
             {
                 var rest = word;
                 while (rest.Length > 0)
                 {
-                    var needed = TextMeter.Width(rest.TrimEnd(' '), face, size);
+                    var needed = TextMeter.Width(rest.TrimEnd(' '), face, own);
                     if (at + needed <= width + 0.01f)
                     {
-                        var whole = TextMeter.Width(rest, face, size);
+                        var whole = TextMeter.Width(rest, face, own);
                         line.Add(new(rest, span, at, whole));
                         at += whole;
                         break;
@@ -49,8 +52,8 @@ internal static class TextWrapper
                         continue;
                     }
 
-                    var taken = LettersThatFit(rest, face, size, width);
-                    line.Add(new(rest[..taken], span, 0f, TextMeter.Width(rest[..taken], face, size)));
+                    var taken = LettersThatFit(rest, face, own, width);
+                    line.Add(new(rest[..taken], span, 0f, TextMeter.Width(rest[..taken], face, own)));
                     lines.Add(Ended(line));
                     (line, rest) = ([], rest[taken..]);
                 }
@@ -84,13 +87,13 @@ internal static class TextWrapper
         return new(joined);
     }
 
-    // Each word keeps the spaces behind it.
+    // Each word keeps the spaces behind it; a hyphen ends a part of a word.
     private static IEnumerable<string> Words(string text)
     {
         var start = 0;
         for (var at = 1; at < text.Length; at++)
         {
-            if (text[at] != ' ' && text[at - 1] == ' ')
+            if (text[at] != ' ' && (text[at - 1] == ' ' || (text[at - 1] == '-' && at > start + 3 && char.IsLetter(text[at]))))
             {
                 yield return text[start..at];
                 start = at;

@@ -7,7 +7,7 @@ namespace RangeReduce.Reporting.Plots;
 internal static class DifferencePlot
 {
     private const string DifferenceKey = "difference";
-    private const double Strip = 0.27;
+    private const double Strip = 0.26;
 
     /// <summary>Makes the plot.</summary>
     /// <param name="curves">The measured and the simulated curve.</param>
@@ -21,7 +21,7 @@ internal static class DifferencePlot
     {
         var plot = PlotFrame.New();
         var upper = PlotFrame.Ordinate(yTitle, y);
-        (upper.StartPosition, upper.EndPosition) = downward ? (1.0, Strip + 0.05) : (Strip + 0.05, 1.0);
+        (upper.StartPosition, upper.EndPosition) = downward ? (1.0, Strip + 0.07) : (Strip + 0.07, 1.0);
         var reach = Reach(difference);
         var lower = PlotFrame.Axis(DifferenceKey, AxisPosition.Left, "Δ (dB)", new AxisScale(-reach, reach, reach));
         (lower.StartPosition, lower.EndPosition) = (0.0, Strip);
@@ -29,7 +29,7 @@ internal static class DifferencePlot
         plot.Axes.Add(upper);
         plot.Axes.Add(lower);
         PlotFrame.AddCurves(plot, curves);
-        PlotFrame.AddCurves(plot, [difference with { Color = PlotPalette.Quiet, Marker = MarkerType.None, Thickness = 1.0 }], DifferenceKey);
+        PlotFrame.AddCurves(plot, [difference with { Name = string.Empty, Color = PlotPalette.Quiet, Marker = MarkerType.None, Thickness = 1.0 }], DifferenceKey);
         PlotFrame.AddLegend(plot, LegendEntry.Sources);
         return plot;
     }

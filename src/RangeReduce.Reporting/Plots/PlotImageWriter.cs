@@ -43,7 +43,7 @@ public static class PlotImageWriter
 
         // Plots are mostly flat ground: a light compression with the filter that suits flat rows is as small as a slow one.
         using var pixels = surface.PeekPixels();
-        using var png = pixels.Encode(new SKPngEncoderOptions(SKPngEncoderFilterFlags.Up, 4))
+        using var png = pixels.Encode(new SKPngEncoderOptions(SKPngEncoderFilterFlags.Up, 1))
             ?? throw new InvalidOperationException($"The picture of {figure.FileName} could not be encoded.");
         return png.ToArray();
     }

@@ -10,7 +10,7 @@ namespace RangeReduce.Reporting.Plots;
 internal static class PolarCutPlot
 {
     private const double RingStepDb = 10.0;
-    private const double LabelAngleDeg = 105.0;
+    private const double LabelAngleDeg = 165.0;
 
     /// <summary>Makes the plot.</summary>
     /// <param name="curves">Curves with the angle in degrees as abscissa and the level in decibels as ordinate.</param>
@@ -19,7 +19,7 @@ internal static class PolarCutPlot
     /// <param name="topDb">Level at the outer ring.</param>
     public static PlotModel Make(IReadOnlyList<PlotCurve> curves, IReadOnlyList<LegendEntry> legend, double floorDb, double topDb)
     {
-        var plot = RoundFrame.New(1.13, 1.13);
+        var plot = RoundFrame.New(1.2, 1.15);
         var rings = (int)Math.Round((topDb - floorDb) / RingStepDb);
         for (var ring = 1; ring <= rings; ring++)
         {
@@ -31,7 +31,7 @@ internal static class PolarCutPlot
             var (x, y) = At(angle, 1.0);
             RoundFrame.AddLine(plot, [0.0, x], [0.0, y], PlotPalette.Grid, 0.5);
             var shown = angle > 180 ? angle - 360 : angle;
-            RoundFrame.AddLabel(plot, 1.08 * x, 1.08 * y, NumberText.Fixed(shown, 0) + "°", PlotPalette.Ink);
+            RoundFrame.AddLabel(plot, 1.13 * x, 1.075 * y, NumberText.Fixed(shown, 0) + "°", PlotPalette.Ink);
         }
 
         PlotFrame.AddCurves(plot, [.. curves.Select(curve => OnPaper(curve, floorDb, topDb))]);

@@ -50,7 +50,8 @@ internal static class ResonanceLabels
             {
                 HorizontalAlignment.Left => new ScreenVector(4, 3),
                 HorizontalAlignment.Right => new ScreenVector(-4, 3),
-                _ => new ScreenVector(0, 4),
+                // A shallow dip lies among flat curves: its label goes well below them.
+                _ => new ScreenVector(0, mark.Y < 8.0 ? 13 : 5),
             },
             TextHorizontalAlignment = side,
             TextVerticalAlignment = VerticalAlignment.Top,

@@ -44,7 +44,7 @@ internal static class Glossary
     private static TableRow Row(Quantity quantity) => new(
     [
         RichText.Strong(Words.Capital(quantity.Name)),
-        quantity.Symbol.Replace("_", string.Empty, StringComparison.Ordinal),
+        quantity.Symbol.Length > 0 ? quantity.Symbol.Replace("_", string.Empty, StringComparison.Ordinal) : "–",
         UnitText.Of(quantity) is { Length: > 0 } unit ? unit : "–",
         quantity.Definition,
         RichText.Quiet(quantity.Source),

@@ -84,8 +84,8 @@ internal static class MakingSection
                 new(["Hand", "of the wave that the antenna transmits, judged looking along propagation", "IEEE Std 145"]),
                 new(["Circular and elliptical", $"called circular up to an axial ratio of {UnitText.Join("3", "dB")}", "common practice"]),
                 new(["Axis of the antenna", $"{NumberText.Trimmed(run.AxisDeg, 2)}° along the cuts", "run.toml or 0"]),
-                new(["Range length", run.RangeLengthM is { } length ? UnitText.Join(NumberText.Trimmed(length, 3), "m") : RichText.Quiet("not given"), "run.toml"]),
-                new(["Largest dimension of the antenna", run.LargestDimensionM is { } dimension ? UnitText.Join(NumberText.Trimmed(dimension, 4), "m") : RichText.Quiet("not given"), "run.toml"]),
+                new(["Range length", run.RangeLengthM is { } length ? UnitText.Join(NumberText.Trimmed(length, 3), "m") : RichText.Quiet("not given"), run.RangeLengthM is null ? NumberText.Missing : "run.toml"]),
+                new(["Largest dimension of the antenna", run.LargestDimensionM is { } dimension ? UnitText.Join(NumberText.Trimmed(dimension, 4), "m") : RichText.Quiet("not given"), run.LargestDimensionM is null ? NumberText.Missing : "run.toml"]),
             ]);
     }
 

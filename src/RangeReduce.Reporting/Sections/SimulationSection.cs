@@ -13,7 +13,7 @@ internal static class SimulationSection
     public static ReportSection? Build(ReportContext context, FileNames names)
     {
         var table = context.Reduced.Table;
-        var deviations = table.Of(QuantityCatalogue.Deviation).ToList();
+        var deviations = table.Of(QuantityCatalogue.Deviation).Where(figure => figure.OtherState is null).ToList();
         var agreements = table.Of(QuantityCatalogue.CurveAgreement).Where(figure => figure.OtherState is null).ToList();
         var scales = table.Of(QuantityCatalogue.FrequencyScale).Where(figure => figure.OtherState is null).ToList();
         if (deviations.Count + agreements.Count + scales.Count == 0)

@@ -23,7 +23,7 @@ internal static class StateComparisonSection
         var blocks = new List<ReportBlock>();
         if (contrasts.Count > 0)
         {
-            blocks.Add(new ParagraphBlock(string.Join(' ', Hands.Select(hand => Sentence(hand, contrasts)).Where(text => text.Length > 0))));
+            blocks.Add(new ParagraphBlock(string.Join(' ', Hands.Select(hand => Sentence(context, hand, contrasts)).Where(text => text.Length > 0))));
             blocks.Add(Matrix(context));
             blocks.Add(ContrastTable(context, contrasts));
             var plots = Hands.Select(hand => Plot(context, hand, contrasts)).OfType<PlotFigure>().ToList();
@@ -49,12 +49,18 @@ internal static class StateComparisonSection
             .Select(group => group.FirstOrDefault(figure => context.FrequencyOf(group.Key.State!).CutHz is { } cut && ReportContext.Same(figure.FrequencyHz, cut)) ?? group.First())
             .OrderBy(figure => figure.Component).ThenBy(figure => figure.Source)];
 
-    private static string Sentence(FieldComponent hand, List<Figure> contrasts)
+    private static string Sentence(ReportContext context, FieldComponent hand, List<Figure> contrasts)
     {
-        var most = contrasts.Where(figure => figure.Component == hand && double.IsFinite(figure.Value)).OrderBy(figure => figure.Source).ThenByDescending(figure => figure.Value).FirstOrDefault();
+        var most = Telling(context, hand, contrasts);
         var at = most?.FrequencyHz is { } frequency ? $" at {FrequencyText.WithUnit(frequency)}" : string.Empty;
         return most is null ? string.Empty : $"On the axis, state {most.State} has {FigureText.WithUnit(most)} more {Words.Of(hand)} level than state {most.OtherState}{at}.";
     }
+
+    // The contrast that a reader asks for first: between two states of opposite hand, measured, and of those the largest.
+    private static Figure? Telling(ReportContext context, FieldComponent hand, List<Figure> contrasts) => contrasts
+        .Where(figure => figure.Component == hand && double.IsFinite(figure.Value))
+        .OrderBy(figure => context.CoCross(figure.State!) is { } one && context.CoCross(figure.OtherState!) is { } other && one != other ? 0 : 1)
+        .ThenBy(figure => figure.Source).ThenByDescending(figure => figure.Value).FirstOrDefault();
 
     private static TableBlock Matrix(ReportContext context)
     {
@@ -85,7 +91,7 @@ internal static class StateComparisonSection
             contrast.Source is { } source ? Words.Of(source) : string.Empty,
             contrast.FrequencyHz is { } frequency ? FrequencyText.WithUnit(frequency) : string.Empty,
             cells.OfKnownSource(contrast),
-            cells.OfKnownSource(context.Figures(QuantityCatalogue.SwitchingReduction, contrast.State).FirstOrDefault(figure => IsTwin(figure, contrast))),
+            Reduction(cells, context.Figures(QuantityCatalogue.SwitchingReduction, contrast.State).FirstOrDefault(figure => IsTwin(figure, contrast))),
         ])).ToList();
         return new(
             "Switching: how much less of a hand the second state has than the first.",
@@ -97,12 +103,16 @@ internal static class StateComparisonSection
         };
     }
 
+    // A share that only rounding makes whole is not printed as 100.
+    private static RichText Reduction(FigureCell cells, Figure? figure) =>
+        figure is { Value: > 99.95 and < 100.0 } && !double.IsFinite(figure.Uncertainty.Expanded) ? ">\u00A099.9" : cells.OfKnownSource(figure);
+
     private static bool IsTwin(Figure one, Figure other) => one.Component == other.Component && one.Source == other.Source && string.Equals(one.OtherState, other.OtherState, StringComparison.Ordinal)
         && Nullable.Equals(one.FrequencyHz, other.FrequencyHz) && Nullable.Equals(one.PhiDeg, other.PhiDeg);
 
     private static PlotFigure? Plot(ReportContext context, FieldComponent hand, List<Figure> contrasts)
     {
-        var most = contrasts.Where(figure => figure.Component == hand && double.IsFinite(figure.Value)).OrderBy(figure => figure.Source).ThenByDescending(figure => figure.Value).FirstOrDefault();
+        var most = Telling(context, hand, contrasts);
         if (most is null || context.FrequencyOf(most.State!).CutHz is not { } frequency || CutKey.Of(context, most.State!) is not [var cut, ..])
         {
             return null;
@@ -120,6 +130,7 @@ internal static class StateComparisonSection
 
         var unit = UnitText.Of(quantity, hand);
         var (_, highest) = PlotCurve.Range(curves);
+        var span = Math.Max(40.0, 10.0 * Math.Ceiling((highest - curves.Min(curve => PlotCurve.Range([curve]).Most) + 15.0) / 10.0));
         var (least, last) = (curves.Min(curve => curve.X[0]), curves.Max(curve => curve.X[^1]));
         var name = $"{Words.Of(hand)} {quantity.Name}";
         return new PlotFigure
@@ -131,7 +142,7 @@ internal static class StateComparisonSection
             WidthShare = 0.5,
             Aspect = 0.76,
             Readout = new(cut.PhiDeg is null ? "φ" : "θ", "°", 1, unit, 1),
-            Make = () => CurvePlot.Make(curves, LegendEntry.ForStates(curves, context.Styles), cut.AngleTitle, CurvePlot.Angles(least, last, wide: false), PlotFrame.Title(name, unit), CurvePlot.Levels(highest, 50.0)),
+            Make = () => CurvePlot.Make(curves, LegendEntry.ForStates(curves, context.Styles), cut.AngleTitle, CurvePlot.Angles(least, last, wide: false), PlotFrame.Title(name, unit), CurvePlot.Levels(highest, span)),
         };
     }
 

@@ -63,7 +63,7 @@ internal static class StateTable
             return;
         }
 
-        rows.Add(new(["Frequency of the pattern figures below", "GHz", .. states.Select(state => RichText.FromString(context.FrequencyOf(state).CutHz is { } cut ? NumberText.Trimmed(cut * 1e-9, 6) : NumberText.Missing))]));
+        rows.Add(new(["Frequency of the pattern figures below", "GHz", .. states.Select(state => RichText.FromString(context.FrequencyOf(state).CutHz is { } cut ? FrequencyText.Digits(cut * 1e-9) : NumberText.Missing))]));
         Figure? Axis(Quantity quantity, string state, FieldComponent? component = null) =>
             context.FindAtCut(quantity, state, figure => figure.At == FigurePlace.Axis && (component is null || figure.Component == component));
         Figure? Cut(Quantity quantity, string state) => context.FindAtCut(quantity, state, figure => figure.At != FigurePlace.Axis);
