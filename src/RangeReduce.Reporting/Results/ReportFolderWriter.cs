@@ -10,7 +10,7 @@ public static class ReportFolderWriter
     /// <param name="paper">Paper of the PDF.</param>
     /// <param name="folder">Where the folder is to stand.</param>
     /// <param name="overwrite">Whether a report that stands there may be replaced.</param>
-    /// <param name="step">Told each step as it begins: <c>results</c>, <c>plots</c>, <c>pdf</c>, <c>html</c>; may be null.</param>
+    /// <param name="step">Told each step as it begins: such as <c>report</c>; may be null.</param>
     /// <param name="cancellationToken">Stops the work between two steps; nothing is left behind then.</param>
     /// <exception cref="IOException">Something stands there and may not be replaced, or the disk failed.</exception>
     /// <exception cref="UnauthorizedAccessException">The place may not be written.</exception>
@@ -20,20 +20,20 @@ public static class ReportFolderWriter
         ArgumentNullException.ThrowIfNull(stamp);
         OutputFolder.Build(folder, overwrite, target =>
         {
-            // Results and plots do not need each other: one core writes text while the other draws.
-            Begin("results");
+            Begin("report");
             var model = ReportModelBuilder.Build(reduced, new() { Made = stamp.At, Version = stamp.Version, Paper = paper });
             var plots = Directory.CreateDirectory(Path.Combine(target, "plots")).FullName;
+            var traces = Directory.CreateDirectory(Path.Combine(target, "traces")).FullName;
+
+            // None of the writers needs another: each core takes the next one.
             Parallel.Invoke(
-                () =>
-                {
-                    WriteFile("results.json", stream => ResultsJsonWriter.Write(reduced, stamp, stream));
-                    WriteFile("figures.csv", stream => FiguresCsvWriter.Write(reduced.Table, stream));
-                    TraceCsvWriter.Write(reduced.Table, Directory.CreateDirectory(Path.Combine(target, "traces")).FullName);
-                },
-                () => WriteFile("report.pdf", stream => PdfReportWriter.Write(model, stream)));
-            Begin("plots");
-            PlotImageWriter.WritePng(model, plots);
+                new ParallelOptions { CancellationToken = cancellationToken },
+                () => PlotImageWriter.WritePng(model, plots),
+                () => WriteFile("report.pdf", stream => PdfReportWriter.Write(model, stream)),
+                () => WriteFile("report.html", stream => HtmlReportWriter.Write(model, stream)),
+                () => WriteFile("results.json", stream => ResultsJsonWriter.Write(reduced, stamp, stream)),
+                () => WriteFile("figures.csv", stream => FiguresCsvWriter.Write(reduced.Table, stream)),
+                () => TraceCsvWriter.Write(reduced.Table, traces));
             cancellationToken.ThrowIfCancellationRequested();
 
             void WriteFile(string name, Action<Stream> write)

@@ -47,11 +47,12 @@ internal sealed class ReportContext
     /// <summary>Gives the traces of a quantity and a state, in order.</summary>
     public IEnumerable<Trace> Traces(Quantity quantity, string? state) => _traces[(quantity.Id, state)];
 
-    /// <summary>Gives the first figure that satisfies a condition: measured where there is one, at the lowest fixed angle of the cuts.</summary>
+    /// <summary>Gives the first figure that satisfies a condition: measured where there is one, of the first kind of probe, over all cuts before that of one cut, at the lowest fixed angle.</summary>
     public Figure? Find(Quantity quantity, string state, Func<Figure, bool> condition) => Figures(quantity, state)
         .Where(figure => condition(figure) && figure.OtherState is null)
         .OrderBy(figure => figure.Source switch { DataSource.Measured => 0, null => 1, _ => 2 })
-        .ThenBy(figure => figure.PhiDeg ?? figure.ThetaDeg ?? 0.0)
+        .ThenBy(figure => figure.Method is null ? 0 : 1)
+        .ThenBy(figure => figure.PhiDeg ?? figure.ThetaDeg ?? double.NegativeInfinity)
         .ThenBy(figure => figure.Rank ?? 0)
         .FirstOrDefault();
 

@@ -73,6 +73,6 @@ internal static class StateSentence
         }
 
         var best = context.Find(QuantityCatalogue.ReturnLoss, state, figure => figure.At == FigurePlace.Resonance && (figure.Rank ?? 1) == 1);
-        return best is null ? "no reflection sweep" : $"nowhere matched, return loss at most {FigureText.WithUnit(best)}";
+        return best is null ? (context.Traces(QuantityCatalogue.ReturnLoss, state).Any() ? "no resonance and no match band inside the sweep" : "no reflection sweep") : $"nowhere matched, return loss at most {FigureText.WithUnit(best)}";
     }
 }

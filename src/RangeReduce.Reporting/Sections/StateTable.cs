@@ -83,10 +83,17 @@ internal static class StateTable
         Add(rows, cells, states, QuantityCatalogue.CrossPolarRatio, " on the axis", state => Axis(QuantityCatalogue.CrossPolarRatio, state));
         foreach (var quantity in new[] { QuantityCatalogue.PeakDirection, QuantityCatalogue.HalfPowerBeamwidth, QuantityCatalogue.SidelobeLevel, QuantityCatalogue.FrontToBackRatio, QuantityCatalogue.AxialRatioBeamwidth, QuantityCatalogue.Directivity, QuantityCatalogue.RadiationEfficiency })
         {
-            Add(rows, cells, states, quantity, string.Empty, state => Cut(quantity, state));
+            Add(rows, cells, states, quantity, InCut(states, state => Cut(quantity, state)), state => Cut(quantity, state));
         }
 
         Add(rows, cells, states, QuantityCatalogue.AxialRatioBand, string.Empty, state => context.Find(QuantityCatalogue.AxialRatioBand, state, figure => (figure.Rank ?? 1) == 1));
+    }
+
+    // Says which cut a row is about, where all its figures are about the same one.
+    private static string InCut(string[] states, Func<string, Figure?> find)
+    {
+        var angles = states.Select(find).OfType<Figure>().Select(figure => figure.PhiDeg).Distinct().ToArray();
+        return angles is [{ } phi] ? $", cut φ = {NumberText.Trimmed(phi, 1)}°" : string.Empty;
     }
 
     // The highest of the components that a reader asks for first: the total, else the co-polar one.

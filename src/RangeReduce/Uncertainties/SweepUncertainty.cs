@@ -50,7 +50,7 @@ internal static class SweepUncertainty
                 // |Γ| near zero is the length of a vector in noise: the same care as for an axial ratio near 0 dB.
                 var magnitudes = Array.ConvertAll(values, Reflection.MagnitudeOfReturnLoss);
                 return TrialResult.Quotient(magnitudes, Reflection.MagnitudeOfReturnLoss(figure.Value)) is { } ends
-                    ? TrialResult.Make(figure.Value, Reflection.ReturnLossDb(ends.High), ends.Low > 0.0 ? Reflection.ReturnLossDb(ends.Low) : double.PositiveInfinity, (Reflection.ReturnLossDb(ends.Low) - Reflection.ReturnLossDb(ends.High)) / 3.92, budget, [])
+                    ? TrialResult.Make(figure.Value, Reflection.ReturnLossDb(ends.High), ends.Low > 0.0 ? Reflection.ReturnLossDb(ends.Low) : double.PositiveInfinity, (Reflection.ReturnLossDb(ends.Low) - Reflection.ReturnLossDb(ends.High)) / 3.92, budget, [new(ErrorTerms.DirectivityKey, (Reflection.ReturnLossDb(ends.Low) - Reflection.ReturnLossDb(ends.High)) / 3.92)])
                     : null;
             }
 
