@@ -8,9 +8,6 @@ namespace RangeReduce.Uncertainties;
 /// <summary>The trials of one cut at one frequency, and what they say about its figures.</summary>
 internal sealed class CutUncertainty
 {
-    // One term at a time needs no tails, only a spread: it is known to an eighth after this many draws.
-    private const int DrawsPerTerm = 32;
-
     private readonly double[] _values;
     private readonly double[][] _trials;
     private readonly (string Term, double[] Spread)[] _terms;
@@ -40,7 +37,7 @@ internal sealed class CutUncertainty
             }
         }
 
-        var terms = SingleTerms(errors).Select(single => (single.Term, Spread(trial, values, single.Errors, ref random))).ToArray();
+        var terms = SingleTermErrors.Of(errors).Select(single => (single.Term, Spread(trial, values, single.Draws, ref random))).ToArray();
         return new(values, results, terms, errors);
     }
 
@@ -90,13 +87,13 @@ internal sealed class CutUncertainty
             : TrialResult.Make(figure.Value, Math.Min(atLow, atHigh), Math.Max(atLow, atHigh), Math.Abs(atHigh - atLow) / 3.92, budget, shares);
     }
 
-    private static double[] Spread(CutTrial trial, double[] values, ErrorTerms single, ref TrialRandom random)
+    private static double[] Spread(CutTrial trial, double[] values, CutErrors[] draws, ref TrialRandom random)
     {
         var squares = new double[values.Length];
         var counts = new int[values.Length];
-        for (var i = 0; i < DrawsPerTerm; i++)
+        foreach (var draw in draws)
         {
-            trial.Run(CutErrors.Draw(single, ref random), ref random);
+            trial.Run(draw, ref random);
             for (var slot = 0; slot < values.Length; slot++)
             {
                 var difference = trial.Values[slot] - values[slot];
@@ -109,26 +106,6 @@ internal sealed class CutUncertainty
         }
 
         return [.. squares.Zip(counts, (sum, count) => count == 0 ? double.NaN : Math.Sqrt(sum / count))];
-    }
-
-    private static IEnumerable<(string Term, ErrorTerms Errors)> SingleTerms(ErrorTerms all)
-    {
-        (string Term, ErrorTerms Errors, bool IsGiven)[] singles =
-        [
-            (ErrorTerms.GainStandardKey, new() { GainStandardDb = all.GainStandardDb }, all.GainStandardDb is not null),
-            (ErrorTerms.LinearityKey, new() { LinearityDb = all.LinearityDb }, all.LinearityDb is not null),
-            (ErrorTerms.MismatchKey, new() { MismatchDb = all.MismatchDb }, all.MismatchDb is not null),
-            (ErrorTerms.ReflectivityKey, new() { Reflectivity = all.Reflectivity }, all.Reflectivity is not null),
-            (ErrorTerms.NoiseFloorKey, new() { Noise = all.Noise }, all.Noise is not null),
-            (ErrorTerms.DriftKey, new() { DriftDb = all.DriftDb }, all.DriftDb is not null),
-            (ErrorTerms.BalanceKey, new() { BalanceDb = all.BalanceDb }, all.BalanceDb is not null),
-            (ErrorTerms.BalancePhaseKey, new() { BalancePhaseDeg = all.BalancePhaseDeg }, all.BalancePhaseDeg is not null),
-            (ErrorTerms.CrossPolarKey, new() { CrossPolar = all.CrossPolar }, all.CrossPolar is not null),
-            (ErrorTerms.AlignmentKey, new() { AlignmentDeg = all.AlignmentDeg }, all.AlignmentDeg is not null),
-            (ErrorTerms.DistanceKey, new() { DistanceDb = all.DistanceDb }, all.DistanceDb is not null),
-            (ErrorTerms.RepeatabilityKey, new() { RepeatabilityDb = all.RepeatabilityDb }, all.RepeatabilityDb is not null),
-        ];
-        return singles.Where(single => single.IsGiven).Select(single => (single.Term, single.Errors));
     }
 
     private static CutSlot? SlotOf(Figure figure)
