@@ -19,7 +19,7 @@ public sealed class TableFaultTests
     [InlineData("f [GHz],theta [deg],H [deg]\n1.62,0,20\n", "missing-channel", 1, 21)]
     [InlineData("f [GHz],theta [deg],H re\n1.62,0,20\n", "missing-channel", 1, 21)]
     [InlineData("f,theta [deg],H [dB]\n1.62,0,20\n", "no-unit", 1, 1)]
-    [InlineData("f [GHz],theta [deg],H level\n1.62,0,20\n", "unknown-heading", 1, 21)]
+    [InlineData("f [GHz],theta [deg],H level\n1.62,0,20\n", "no-unit", 1, 21)]
     [InlineData("f [GHz],theta [deg],H [dB],foo\n1.62,0,20,1\n", "unknown-heading", 1, 28)]
     [InlineData("f [GHz],theta [deg],H [dB],H (dB)\n1.62,0,20,1\n", "duplicate-column", 1, 28)]
     [InlineData("f [GHz],theta [deg],theta (rad),H (dB)\n1.62,0,20,1\n", "duplicate-column", 1, 21)]

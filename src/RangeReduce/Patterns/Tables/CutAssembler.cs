@@ -92,23 +92,42 @@ internal sealed class CutAssembler
 
     private void MarkKeys(in SampleRun run, int across)
     {
+        if (IsAlongCut(run))
+        {
+            var grid = _grids[CutAt(run, 0, across)];
+            grid.HasFrequency[Index(run, 0, TableKey.Frequency, across)] = true;
+            grid.MarkAngles(Index(run, 0, _frame.MovingSlot, across), run.Count);
+            grid.Take(run.Line, run.Line + run.Count - 1);
+            return;
+        }
+
         for (var at = 0; at < run.Count; at++)
         {
             var grid = _grids[CutAt(run, at, across)];
             grid.HasFrequency[Index(run, at, TableKey.Frequency, across)] = true;
-            grid.HasAngle[Index(run, at, _frame.MovingSlot, across)] = true;
-            grid.Take(run.Line + at);
+            grid.MarkAngles(Index(run, at, _frame.MovingSlot, across), 1);
+            grid.Take(run.Line + at, run.Line + at);
         }
     }
 
     private void MarkCells(in SampleRun run, int row, int across)
     {
+        if (IsAlongCut(run) && _grids[CutAt(run, 0, across)] is { IsStraight: true } straight)
+        {
+            straight.Fill(straight.Cell(Index(run, 0, TableKey.Frequency, across), Index(run, 0, _frame.MovingSlot, across)), run.Count, row, across);
+            return;
+        }
+
         for (var at = 0; at < run.Count; at++)
         {
             var grid = _grids[CutAt(run, at, across)];
-            grid.Fill(grid.Cell(Index(run, at, TableKey.Frequency, across), Index(run, at, _frame.MovingSlot, across)), row + at, across);
+            grid.Fill(grid.Cell(Index(run, at, TableKey.Frequency, across), Index(run, at, _frame.MovingSlot, across)), 1, row + at, across);
         }
     }
+
+    /// <summary>Gives whether the rows of a run step upwards along one cut at one frequency.</summary>
+    private bool IsAlongCut(in SampleRun run) =>
+        run.Step(_frame.MovingSlot) == 1 && _acrossSlot != _frame.MovingSlot && (run.FrequencyStep == 0 || _acrossSlot == TableKey.Frequency) && (run.Step(_frame.FixedSlot) == 0 || _acrossSlot == _frame.FixedSlot);
 
     private int CutAt(in SampleRun run, int at, int across) =>
         _cutOf[_acrossSlot == _frame.FixedSlot ? across : run.Start(_frame.FixedSlot) + (at * run.Step(_frame.FixedSlot))];
@@ -124,7 +143,7 @@ internal sealed class CutAssembler
             var arrays = new PartArrays(_grids);
             foreach (var column in group)
             {
-                arrays.TakeRepeats(_grids, _store.Columns[column], _acrossIndex[column], _plan.Values[column].Factor);
+                arrays.TakeRepeats(_grids, _store.Samples, column, _acrossIndex[column], _plan.Values[column].Factor);
                 Scatter(arrays, column);
             }
 
@@ -138,39 +157,36 @@ internal sealed class CutAssembler
     /// <summary>Walks the rows backwards, so that the first reading of a cell is the one that stays.</summary>
     private void Scatter(PartArrays arrays, int column)
     {
-        var samples = _store.Columns[column];
+        var samples = _store.Samples;
         var (factor, across) = (_plan.Values[column].Factor, _acrossIndex[column]);
+        var runs = _store.Runs;
         var block = samples.BlockCount - 1;
-        var blockStart = _store.Rows - samples.Block(block).Length;
+        var blockStart = samples.BlockStart(block);
         var end = _store.Rows;
-        for (var which = _store.Runs.Count - 1; which >= 0; which--)
+        for (var which = runs.Count - 1; which >= 0; which--)
         {
-            var run = _store.Runs[which];
+            var run = runs[which];
             var start = end - run.Count;
             while (end > start)
             {
                 var from = Math.Max(start, blockStart);
-                var values = samples.Block(block)[(from - blockStart)..(end - blockStart)];
+                var values = samples.Block(column, block)[(from - blockStart)..(end - blockStart)];
                 Copy(values, factor, run, from - start, across, arrays.Cells);
                 end = from;
                 if (end == blockStart && block > 0)
                 {
-                    samples.Release(block--);
-                    blockStart -= samples.Block(block).Length;
+                    samples.Release(column, block--);
+                    blockStart = samples.BlockStart(block);
                 }
             }
         }
-
-        samples.Dispose();
     }
 
     /// <summary>Copies consecutive rows of one run.</summary>
     private void Copy(ReadOnlySpan<double> values, double factor, in SampleRun run, int offset, int across, double[][] arrays)
     {
-        var moving = run.Step(_frame.MovingSlot);
-        var steady = moving == 1 && _acrossSlot != _frame.MovingSlot && (run.Step(TableKey.Frequency) == 0 || _acrossSlot == TableKey.Frequency) && (run.Step(_frame.FixedSlot) == 0 || _acrossSlot == _frame.FixedSlot);
         var cut = CutAt(run, offset, across);
-        if (steady && factor == 1.0 && _grids[cut].IsStraight)
+        if (factor == 1.0 && IsAlongCut(run) && _grids[cut].IsStraight)
         {
             values.CopyTo(arrays[cut].AsSpan(_grids[cut].Cell(Index(run, offset, TableKey.Frequency, across), Index(run, offset, _frame.MovingSlot, across))));
             return;

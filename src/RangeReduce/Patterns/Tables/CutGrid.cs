@@ -1,5 +1,3 @@
-using System.Collections;
-
 namespace RangeReduce.Patterns.Tables;
 
 /// <summary>The grid of one cut: its frequencies and angles, and which of its cells the table fills.</summary>
@@ -9,13 +7,13 @@ internal sealed class CutGrid
     private int[] _angleAt = [];
 
     /// <summary>Makes a grid over the frequencies and angles that the table has in all.</summary>
-    public CutGrid(int frequencies, int angles) => (HasFrequency, HasAngle) = (new(frequencies), new(angles));
+    public CutGrid(int frequencies, int angles) => (HasFrequency, HasAngle) = (new bool[frequencies], new bool[angles]);
 
     /// <summary>Gets which of the table's frequencies occur.</summary>
-    public BitArray HasFrequency { get; }
+    public bool[] HasFrequency { get; }
 
     /// <summary>Gets which of the table's angles occur.</summary>
-    public BitArray HasAngle { get; }
+    public bool[] HasAngle { get; }
 
     /// <summary>Gets the frequencies in hertz, rising.</summary>
     public double[] FrequencyHz { get; private set; } = [];
@@ -24,7 +22,7 @@ internal sealed class CutGrid
     public double[] AngleDeg { get; private set; } = [];
 
     /// <summary>Gets which cells are filled.</summary>
-    public BitArray Filled { get; private set; } = new(0);
+    public bool[] Filled { get; private set; } = [];
 
     /// <summary>Gets the number of filled cells.</summary>
     public int FilledCount { get; private set; }
@@ -38,8 +36,11 @@ internal sealed class CutGrid
     /// <summary>Gets the number of cells.</summary>
     public long CellCount => (long)FrequencyHz.Length * AngleDeg.Length;
 
-    /// <summary>Takes the line of a row in.</summary>
-    public void Take(int line) => Lines = (Math.Min(Lines.First, line), Math.Max(Lines.Last, line));
+    /// <summary>Takes the lines of rows in.</summary>
+    public void Take(int first, int last) => Lines = (Math.Min(Lines.First, first), Math.Max(Lines.Last, last));
+
+    /// <summary>Marks consecutive angles as occurring.</summary>
+    public void MarkAngles(int first, int count) => HasAngle.AsSpan(first, count).Fill(true);
 
     /// <summary>Sorts the axes once all keys are marked.</summary>
     /// <param name="frequencyHz">The frequency of each index.</param>
@@ -52,7 +53,7 @@ internal sealed class CutGrid
     }
 
     /// <summary>Makes the map of filled cells; the axes must be sorted and the number of cells checked.</summary>
-    public void Open() => Filled = new(checked((int)CellCount));
+    public void Open() => Filled = new bool[CellCount];
 
     /// <summary>Gives the cell of a frequency and an angle by their indices in the table.</summary>
     public int Cell(int frequency, int angle) => (_frequencyAt[frequency] * AngleDeg.Length) + _angleAt[angle];
@@ -60,21 +61,32 @@ internal sealed class CutGrid
     /// <summary>Gets whether the angles come in rising order and all belong to this cut, so that rows along the angle are cells along the angle.</summary>
     public bool IsStraight { get; private set; }
 
-    /// <summary>Marks a cell.</summary>
-    public void Fill(int cell, int row, int across)
+    /// <summary>Marks consecutive cells that consecutive rows fill.</summary>
+    public void Fill(int cell, int count, int row, int across)
     {
-        if (Filled[cell])
+        var filled = Filled.AsSpan(cell, count);
+        if (!filled.Contains(true))
         {
-            Repeats.Add((row, across, cell));
+            filled.Fill(true);
+            FilledCount += count;
+            return;
         }
-        else
+
+        for (var at = 0; at < count; at++)
         {
-            Filled[cell] = true;
-            FilledCount++;
+            if (filled[at])
+            {
+                Repeats.Add((row + at, across, cell + at));
+            }
+            else
+            {
+                filled[at] = true;
+                FilledCount++;
+            }
         }
     }
 
-    private static (double[] Values, int[] At) Ranks(BitArray has, IReadOnlyList<double> values)
+    private static (double[] Values, int[] At) Ranks(bool[] has, IReadOnlyList<double> values)
     {
         var used = Enumerable.Range(0, has.Length).Where(at => has[at]).ToArray();
         var sorted = used.Select(at => values[at]).Distinct().Order().ToArray();

@@ -1,11 +1,9 @@
-using System.Collections.Frozen;
-
 namespace RangeReduce.Patterns.Tables;
 
 /// <summary>The words that headings are made of.</summary>
 internal static class HeadingWords
 {
-    private static readonly FrozenDictionary<string, HeadingKind> Names = Map<HeadingKind>(
+    private static readonly Dictionary<string, HeadingKind> Names = Map<HeadingKind>(
         (HeadingKind.Frequency, "f freq frequency frequencies frq frequenz frequence frecuencia"),
         (HeadingKind.Theta, "theta th"),
         (HeadingKind.Phi, "phi"),
@@ -15,13 +13,13 @@ internal static class HeadingWords
         (HeadingKind.Angle, "angle ang position pos rotation rotator turntable positioner"),
         (HeadingKind.Spin, "spin spinning"));
 
-    private static readonly FrozenDictionary<string, ChannelPart> Parts = Map<ChannelPart>(
+    private static readonly Dictionary<string, ChannelPart> Parts = Map<ChannelPart>(
         (ChannelPart.Amplitude, "mag magnitude amp ampl amplitude abs lin linear"),
         (ChannelPart.Phase, "phase phs arg ang angle"),
         (ChannelPart.Real, "re real"),
         (ChannelPart.Imaginary, "im imag imaginary"));
 
-    private static readonly FrozenDictionary<string, string> Channels = Map<string>(
+    private static readonly Dictionary<string, string> Channels = Map<string>(
         ("theta", "theta etheta eth thetapol"),
         ("phi", "phi ephi eph phipol"),
         ("right", "right rhcp rcp rhc rh er eright righthand righthandcircular righthandcircularpolarization ercp erhcp"),
@@ -29,16 +27,16 @@ internal static class HeadingWords
         ("h", "h hor horiz horizontal hpol eh ehor"),
         ("v", "v ver vert vertical vpol ev ever"));
 
-    private static readonly FrozenDictionary<string, ChannelPart> Reflections = Map<ChannelPart>(
+    private static readonly Dictionary<string, ChannelPart> Reflections = Map<ChannelPart>(
         (ChannelPart.ReturnLoss, "returnloss rl"),
         (ChannelPart.StandingWaveRatio, "vswr swr standingwaveratio"),
         (ChannelPart.None, "gamma reflection reflectioncoefficient reflectioncoeff reflectionfactor"));
 
-    private static readonly FrozenSet<string> Noise = Set(
+    private static readonly HashSet<string> Noise = Set(
         "e field component comp pol polarization polarisation probe port channel ch signal response gain realized realised rx receive receiver received "
         + "far farfield value data measured of part level power in the axis cut coordinate actual encoder log");
 
-    private static readonly FrozenSet<string> SpareNames = Set(
+    private static readonly HashSet<string> SpareNames = Set(
         "time date timestamp clock elapsed temp temperature humidity pressure index idx no nr number sample point row record count comment comments remark remarks note notes "
         + "operator status flag battery axialratio ar tilt tiltangle xpd crosspolarratio crosspolarizationratio");
 
@@ -53,6 +51,9 @@ internal static class HeadingWords
 
     /// <summary>Gives whether the joined words name something that no figure needs.</summary>
     public static bool IsSpare(string joined) => SpareNames.Contains(joined);
+
+    /// <summary>Gives whether this is the canonical name of a channel.</summary>
+    public static bool IsChannel(string name) => Channels.TryGetValue(name, out var canonical) && string.Equals(name, canonical, StringComparison.Ordinal);
 
     /// <summary>Gives whether a word says nothing about which channel is meant.</summary>
     public static bool IsNoise(string word) => Noise.Contains(word);
@@ -84,8 +85,19 @@ internal static class HeadingWords
         return Channels.GetValueOrDefault(string.Concat(telling)) ?? string.Join('_', telling);
     }
 
-    private static FrozenDictionary<string, T> Map<T>(params (T Meaning, string Words)[] entries) =>
-        entries.SelectMany(entry => entry.Words.Split(' ').Select(word => (word, entry.Meaning))).ToFrozenDictionary(pair => pair.word, pair => pair.Meaning, StringComparer.Ordinal);
+    private static Dictionary<string, T> Map<T>(params (T Meaning, string Words)[] entries)
+    {
+        var map = new Dictionary<string, T>(StringComparer.Ordinal);
+        foreach (var (meaning, words) in entries)
+        {
+            foreach (var word in words.Split(' '))
+            {
+                map.Add(word, meaning);
+            }
+        }
 
-    private static FrozenSet<string> Set(string words) => words.Split(' ').ToFrozenSet(StringComparer.Ordinal);
+        return map;
+    }
+
+    private static HashSet<string> Set(string words) => new(words.Split(' '), StringComparer.Ordinal);
 }

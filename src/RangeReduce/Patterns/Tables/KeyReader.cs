@@ -1,3 +1,4 @@
+using System.Buffers.Binary;
 using RangeReduce.Diagnostics;
 
 namespace RangeReduce.Patterns.Tables;
@@ -5,9 +6,8 @@ namespace RangeReduce.Patterns.Tables;
 /// <summary>Reads one key column: a cell that says the same as in the row before is not parsed again.</summary>
 internal sealed class KeyReader(TableContext context, TableKey key, KeyIndex index)
 {
-    private readonly byte[] _text = new byte[32];
     private readonly byte _decimal = (byte)context.Head.Dialect.Decimal;
-    private int _length = -1;
+    private ulong[] _texts = new ulong[64];
     private int _last;
 
     /// <summary>Reads a cell.</summary>
@@ -15,11 +15,66 @@ internal sealed class KeyReader(TableContext context, TableKey key, KeyIndex ind
     /// <exception cref="MeasurementDataException">The value is none that this key can have.</exception>
     public int Read(ReadOnlySpan<byte> cell, RowSource row)
     {
-        if (cell.Length == _length && cell.SequenceEqual(_text.AsSpan(0, _length)))
+        var text = Packed(cell);
+        if (text != 0)
         {
-            return _last;
+            if (_texts[_last] == text)
+            {
+                return _last;
+            }
+
+            // A table mostly stays, steps on or starts again.
+            if (_last + 1 < _texts.Length && _texts[_last + 1] == text)
+            {
+                return ++_last;
+            }
+
+            if (_texts[0] == text)
+            {
+                return _last = 0;
+            }
         }
 
+        var found = Parsed(cell, row);
+        if (found < 0)
+        {
+            return found;
+        }
+
+        if (found >= _texts.Length)
+        {
+            Array.Resize(ref _texts, Math.Max(found + 1, 2 * _texts.Length));
+        }
+
+        _texts[found] = text;
+        return _last = found;
+    }
+
+    /// <summary>Gives up to seven bytes and their number as one word; 0 for a longer cell.</summary>
+    private static ulong Packed(ReadOnlySpan<byte> cell)
+    {
+        if (cell.Length > 7)
+        {
+            return 0;
+        }
+
+        var word = (ulong)cell.Length << 56;
+        if (cell.Length >= 4)
+        {
+            // The first four bytes and the last three: together all of them, at least once.
+            return word | BinaryPrimitives.ReadUInt32LittleEndian(cell) | ((ulong)(BinaryPrimitives.ReadUInt32LittleEndian(cell[^4..]) >> 8) << 32);
+        }
+
+        for (var at = 0; at < cell.Length; at++)
+        {
+            word |= (ulong)cell[at] << (8 * at);
+        }
+
+        return word;
+    }
+
+    private int Parsed(ReadOnlySpan<byte> cell, RowSource row)
+    {
         if (!CellText.TryNumber(cell, _decimal, out var value) && !CellText.TryNumber(CellText.Trimmed(cell), _decimal, out value) && !CellText.TryOddNumber(CellText.Trimmed(cell), _decimal, out value))
         {
             return -1;
@@ -32,10 +87,7 @@ internal sealed class KeyReader(TableContext context, TableKey key, KeyIndex ind
             throw TableFaults.KeyOutOfRange(row.Place(key.Column), cell, context, key);
         }
 
-        _last = index.Find(isFrequency ? Whole(value) : WholeMicro(value));
-        _length = cell.Length <= _text.Length ? cell.Length : -1;
-        cell[..Math.Max(0, _length)].CopyTo(_text);
-        return _last;
+        return index.Find(isFrequency ? Whole(value) : WholeMicro(value));
     }
 
     /// <summary>Takes the last-digit noise of the change of unit off, so that 1.62 GHz and 1620 MHz are the same.</summary>

@@ -42,7 +42,7 @@ internal sealed class MissingSamples(TableContext context, IReadOnlyList<ValueCo
         {
             if (_suspects[column] is { } list)
             {
-                Decide(store.Columns[column], column, list);
+                Decide(store.Samples, column, list);
             }
         }
 
@@ -52,12 +52,12 @@ internal sealed class MissingSamples(TableContext context, IReadOnlyList<ValueCo
         }
     }
 
-    private void Decide(GrowingColumn samples, int column, List<(int Row, double Value, SourcePlace Place)> list)
+    private void Decide(SampleBlocks samples, int column, List<(int Row, double Value, SourcePlace Place)> list)
     {
         var largest = 0.0;
         for (var block = 0; block < samples.BlockCount; block++)
         {
-            foreach (var value in samples.Block(block))
+            foreach (var value in samples.Block(column, block))
             {
                 largest = Math.Max(largest, double.IsNaN(value) ? 0.0 : Math.Abs(value));
             }
@@ -83,7 +83,7 @@ internal sealed class MissingSamples(TableContext context, IReadOnlyList<ValueCo
 
         foreach (var (row, value, _) in list)
         {
-            samples[row] = value;
+            samples.At(column, row) = value;
         }
     }
 }

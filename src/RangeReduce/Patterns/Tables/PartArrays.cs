@@ -18,7 +18,7 @@ internal sealed class PartArrays
     public double[][] Repeats { get; }
 
     /// <summary>Takes the repeated samples out of a column before it is scattered.</summary>
-    public void TakeRepeats(CutGrid[] grids, GrowingColumn column, int across, double factor)
+    public void TakeRepeats(CutGrid[] grids, SampleBlocks samples, int column, int across, double factor)
     {
         for (var cut = 0; cut < grids.Length; cut++)
         {
@@ -26,7 +26,7 @@ internal sealed class PartArrays
             {
                 if (grids[cut].Repeats[at].Across == across)
                 {
-                    Repeats[cut][at] = column[grids[cut].Repeats[at].Row] * factor;
+                    Repeats[cut][at] = samples.At(column, grids[cut].Repeats[at].Row) * factor;
                 }
             }
         }

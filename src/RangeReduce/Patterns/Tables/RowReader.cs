@@ -1,4 +1,5 @@
 using System.Globalization;
+using CsvHelper;
 using RangeReduce.Diagnostics;
 
 namespace RangeReduce.Patterns.Tables;
@@ -12,10 +13,10 @@ internal sealed class RowReader
     private readonly RowSource _rows;
     private readonly KeyReader?[] _keys = new KeyReader?[3];
     private readonly int[] _fixed = new int[3];
+    private readonly int[] _keyColumns = new int[3];
     private readonly int[] _columns;
     private readonly double[] _low;
     private readonly double[] _high;
-    private readonly double[] _sample;
     private readonly MissingSamples _missing;
     private readonly byte _decimal;
     private bool _oddNumbers;
@@ -27,7 +28,6 @@ internal sealed class RowReader
         (_context, _plan, _store, _rows) = (context, plan, store, rows);
         _decimal = (byte)context.Head.Dialect.Decimal;
         _missing = new(context, plan.Values);
-        _sample = new double[plan.Values.Count];
         _columns = [.. plan.Values.Select(value => value.Column)];
         (_low, _high) = (new double[plan.Values.Count], new double[plan.Values.Count]);
         for (var at = 0; at < plan.Values.Count; at++)
@@ -46,6 +46,7 @@ internal sealed class RowReader
         {
             var key = plan.Keys[slot];
             _keys[slot] = key.Column >= 0 ? new KeyReader(context, key, store.Keys[slot]) : null;
+            _keyColumns[slot] = key.Column;
             _fixed[slot] = key.Column >= 0 ? -1 : key.IsAcross ? 0 : store.Keys[slot].Find(key.Fixed);
         }
     }
@@ -54,27 +55,14 @@ internal sealed class RowReader
     /// <exception cref="MeasurementDataException">A row is not what the headings promise.</exception>
     public void ReadAll()
     {
-        var expected = _context.Head.FieldCount;
         var most = Math.Min(_context.Options.MaxSamples / Math.Max(1, _columns.Length), int.MaxValue - 1);
-        var (store, columns, sample) = (_store, _store.Columns, _sample);
-        while (_rows.Read())
+        try
         {
-            if ((_rows.Count != expected && !IsRow(expected)) || !Keys(out var keys) || !Samples())
-            {
-                continue;
-            }
-
-            if (store.Rows >= most)
-            {
-                throw TableFaults.TooManySamples(new(_context.File, _rows.Line), _context.Options.MaxSamples);
-            }
-
-            for (var at = 0; at < columns.Length; at++)
-            {
-                columns[at].Add(sample[at]);
-            }
-
-            store.AddRow(_rows.Line, keys.Frequency, keys.First, keys.Second);
+            ReadRows(most);
+        }
+        catch (Exception fault) when (fault is CsvFormatException or InvalidDataException)
+        {
+            throw TableFaults.LineTooLong(new(_context.File), _context.Options.MaxLineBytes, fault.Message);
         }
 
         _missing.Finish(_store);
@@ -94,10 +82,23 @@ internal sealed class RowReader
         }
     }
 
-    private bool Keys(out (int Frequency, int First, int Second) keys)
+    private void ReadRows(long most)
     {
-        keys = default;
-        return Key(0, out keys.Frequency) && Key(1, out keys.First) && Key(2, out keys.Second);
+        var expected = _context.Head.FieldCount;
+        while (_rows.Read())
+        {
+            if ((_rows.Count != expected && !IsRow(expected)) || !Key(0, out var frequency) || !Key(1, out var first) || !Key(2, out var second) || !Samples())
+            {
+                continue;
+            }
+
+            if (_store.Rows >= most)
+            {
+                throw TableFaults.TooManySamples(new(_context.File, _rows.Line), _context.Options.MaxSamples);
+            }
+
+            _store.AddRow(_rows.Line, frequency, first, second);
+        }
     }
 
     private bool Key(int slot, out int index)
@@ -108,19 +109,19 @@ internal sealed class RowReader
             return true;
         }
 
-        var column = _plan.Keys[slot].Column;
+        var column = _keyColumns[slot];
         index = reader.Read(_rows.Field(column), _rows);
         return index >= 0 || (IsPassedOver() ? false : throw TableFaults.BadNumber(_rows.Place(column), _rows.Field(column), _plan.Headings[column].Text, _context.Head.Dialect));
     }
 
     private bool Samples()
     {
-        var (rows, columns, low, high, sample, sign) = (_rows, _columns, _low, _high, _sample, _decimal);
+        var (rows, columns, low, high, samples, sign) = (_rows, _columns, _low, _high, _store.Samples, _decimal);
         for (var at = 0; at < columns.Length; at++)
         {
             var column = columns[at];
             var cell = rows.Field(column);
-            if (!CellText.TryNumber(cell, sign, out var value) && !TrySlowly(cell, column, out value))
+            if (!PlainDecimal.TryParse(cell, sign, out var value) && !CellText.TryNumber(cell, sign, out value) && !TrySlowly(cell, column, out value))
             {
                 return false;
             }
@@ -130,7 +131,7 @@ internal sealed class RowReader
                 value = SecondLook(at, column, value, cell);
             }
 
-            sample[at] = value;
+            samples.Put(at, value);
         }
 
         return true;
@@ -207,11 +208,11 @@ internal sealed class RowReader
         var only = record.IndexOfAnyExcept(TextSigns.Emptiness);
         if (only < 0)
         {
-            _emptyRows++;
+            _emptyRows += record.IsEmpty ? 0 : 1;
             return true;
         }
 
-        var line = new HeadLine(_rows.Line, 0, record.Length > 1 << 16 ? string.Empty : CellText.Decode(record));
+        var line = HeadLine.Of(_rows.Line, record[..Math.Min(record.Length, 1 << 16)]);
         if (line.IsComment)
         {
             Comment(line.Content);

@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using CsvHelper;
 using RangeReduce.Diagnostics;
 
@@ -14,26 +15,28 @@ internal sealed class RowSource : IDisposable
     private readonly bool _blanks;
     private (int Start, int Length)[] _fields = new (int, int)[16];
     private int _count;
+    private long _line;
 
     /// <summary>Starts at the first row of samples.</summary>
     public RowSource(Stream stream, TableContext context)
     {
         _context = context;
         _blanks = context.Head.Dialect.IsBlanks;
+        _line = context.Head.DataLine - 1L;
         _reader = CsvReader.Create(stream, new CsvReaderOptions
         {
             Separator = _blanks ? NoSeparator : context.Head.Dialect.Separator,
             Mode = _blanks ? CsvMode.NoEscape : CsvMode.Rfc4180,
             HasHeader = false,
             AllowLineBreaksInQuotes = false,
-            TrackLineNumbers = true,
+            SkipEmptyLines = false,
             MaxRecordSize = context.Options.MaxLineBytes,
             BufferSize = 128 * 1024,
         });
     }
 
     /// <summary>Gets the line of the current row.</summary>
-    public int Line => (int)Math.Min(int.MaxValue, _reader.LineNumber + _context.Head.DataLine - 1);
+    public int Line => (int)Math.Min(int.MaxValue, _line);
 
     /// <summary>Gets the number of fields of the current row.</summary>
     public int Count => _blanks ? _count : _reader.FieldCount;
@@ -42,24 +45,20 @@ internal sealed class RowSource : IDisposable
     public ReadOnlySpan<byte> Record => _reader.RawRecord;
 
     /// <summary>Gives the bytes of one field as they stand in the file; quotes and blanks around them are left on.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public ReadOnlySpan<byte> Field(int at) => _blanks ? _reader.RawRecord.Slice(_fields[at].Start, _fields[at].Length) : _reader.GetRawSpan(at);
 
-    /// <summary>Goes to the next row that is not empty.</summary>
-    /// <exception cref="MeasurementDataException">A line is longer than the limit.</exception>
+    /// <summary>Goes to the next line; an empty one is a row without anything in it.</summary>
+    /// <exception cref="CsvFormatException">A line is longer than the limit.</exception>
     public bool Read()
     {
-        try
+        if (!_reader.Read())
         {
-            if (!_reader.Read())
-            {
-                return false;
-            }
-        }
-        catch (Exception fault) when (fault is CsvFormatException or InvalidDataException)
-        {
-            throw TableFaults.LineTooLong(new(_context.File), _context.Options.MaxLineBytes, fault.Message);
+            return false;
         }
 
+        // Every line break ends a row, and empty lines are rows too: counting rows counts lines.
+        _line++;
         if (_blanks)
         {
             SplitBlanks();

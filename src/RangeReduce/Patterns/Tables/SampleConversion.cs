@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using System.Runtime.Intrinsics;
 
 namespace RangeReduce.Patterns.Tables;
@@ -74,41 +75,57 @@ internal static class SampleConversion
         }
     }
 
+    // Vector code is an order of magnitude slower before it is optimised, and a small table is over by then.
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     private static void FromDecibel(Span<double> values, double factor)
     {
-        var at = 0;
-        for (; at <= values.Length - Vector256<double>.Count; at += Vector256<double>.Count)
+        Span<double> last = stackalloc double[Vector256<double>.Count];
+        for (var at = 0; at < values.Length; at += Vector256<double>.Count)
         {
-            var four = values.Slice(at, Vector256<double>.Count);
-            Vector256.Exp(Vector256.Create<double>(four) * factor).CopyTo(four);
-        }
+            // The last few go through the same code as all others, so that a sample does not depend on its neighbours.
+            var rest = values[at..];
+            var four = rest.Length >= Vector256<double>.Count ? rest[..Vector256<double>.Count] : last;
+            if (rest.Length < four.Length)
+            {
+                rest.CopyTo(four);
+            }
 
-        for (; at < values.Length; at++)
-        {
-            // The same code as above for the last few, so that a sample does not depend on its neighbours.
-            values[at] = Vector256.Exp(Vector256.Create(values[at] * factor))[0];
+            Vector256.Exp(Vector256.Create<double>(four) * factor).CopyTo(four);
+            if (rest.Length < four.Length)
+            {
+                four[..rest.Length].CopyTo(rest);
+            }
         }
     }
 
     /// <summary>Turns amplitude and phase in degrees into real and imaginary part.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     private static void ToRectangular(Span<double> size, Span<double> phaseDeg)
     {
         const double RadianPerDegree = Math.PI / 180.0;
-        var at = 0;
-        for (; at <= size.Length - Vector256<double>.Count; at += Vector256<double>.Count)
+        Span<double> lastSizes = stackalloc double[Vector256<double>.Count];
+        Span<double> lastPhases = stackalloc double[Vector256<double>.Count];
+        for (var at = 0; at < size.Length; at += Vector256<double>.Count)
         {
-            var sizes = size.Slice(at, Vector256<double>.Count);
-            var phases = phaseDeg.Slice(at, Vector256<double>.Count);
+            var count = Math.Min(Vector256<double>.Count, size.Length - at);
+            var isWhole = count == Vector256<double>.Count;
+            var sizes = isWhole ? size.Slice(at, count) : lastSizes;
+            var phases = isWhole ? phaseDeg.Slice(at, count) : lastPhases;
+            if (!isWhole)
+            {
+                size[at..].CopyTo(sizes);
+                phaseDeg[at..].CopyTo(phases);
+            }
+
             var amplitude = Vector256.Create<double>(sizes);
             var (sine, cosine) = Vector256.SinCos(Vector256.Create<double>(phases) * RadianPerDegree);
             (amplitude * cosine).CopyTo(sizes);
             (amplitude * sine).CopyTo(phases);
-        }
-
-        for (; at < size.Length; at++)
-        {
-            var (sine, cosine) = Vector256.SinCos(Vector256.Create(phaseDeg[at] * RadianPerDegree));
-            (size[at], phaseDeg[at]) = (size[at] * cosine[0], size[at] * sine[0]);
+            if (!isWhole)
+            {
+                sizes[..count].CopyTo(size[at..]);
+                phases[..count].CopyTo(phaseDeg[at..]);
+            }
         }
     }
 

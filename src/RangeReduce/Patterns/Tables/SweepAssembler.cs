@@ -44,9 +44,9 @@ internal static class SweepAssembler
     {
         var values = new double[store.Rows];
         var at = 0;
-        for (var block = 0; block < store.Columns[column].BlockCount; block++)
+        for (var block = 0; block < store.Samples.BlockCount; block++)
         {
-            foreach (var value in store.Columns[column].Block(block))
+            foreach (var value in store.Samples.Block(column, block))
             {
                 values[at++] = value * factor;
             }

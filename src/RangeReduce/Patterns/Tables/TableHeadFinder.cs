@@ -9,7 +9,7 @@ internal static class TableHeadFinder
 
     /// <summary>Looks through the head of a file.</summary>
     /// <returns>Null where nothing looks like rows of numbers under a line of headings; <paramref name="bare"/> then tells of rows without headings.</returns>
-    public static TableHead? Find(ReadOnlySpan<byte> bytes, bool isWhole, IReadOnlyDictionary<string, string> laidDown, out (HeadLine Line, int Fields)? bare)
+    public static TableHead? Find(byte[] bytes, bool isWhole, IReadOnlyDictionary<string, string> laidDown, out (HeadLine Line, int Fields)? bare)
     {
         var lines = HeadLine.Split(bytes, isWhole);
         bare = null;

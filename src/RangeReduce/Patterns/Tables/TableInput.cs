@@ -15,7 +15,7 @@ internal sealed class TableInput
     private TableInput(byte[] head, bool whole, Stream rest) => (_head, IsWhole, _rest) = (head, whole, rest);
 
     /// <summary>Gets the first bytes, without a byte order mark.</summary>
-    public ReadOnlySpan<byte> Head => _head;
+    public byte[] Head => _head;
 
     /// <summary>Gets whether the head is all there is.</summary>
     public bool IsWhole { get; }

@@ -49,7 +49,7 @@ public static class TableReader
         var remarks = new List<Remark>();
         var input = TableInput.Open(stream, displayPath, remarks);
         var head = TableHeadFinder.Find(input.Head, input.IsWhole, options.Columns, out var bare)
-            ?? throw (input.Head.IsEmpty ? TableFaults.Empty(displayPath) : bare is { } found ? TableFaults.NoHeadings(new(displayPath, found.Line.Number), found.Fields) : TableFaults.NoTable(displayPath));
+            ?? throw (input.Head.Length == 0 ? TableFaults.Empty(displayPath) : bare is { } found ? TableFaults.NoHeadings(new(displayPath, found.Line.Number), found.Fields) : TableFaults.NoTable(displayPath));
         var context = new TableContext(displayPath, head, options, remarks);
         var plan = TablePlanner.Plan(context);
         using var store = new SampleStore(plan.Values.Count);

@@ -39,6 +39,12 @@ internal static class ValuePlanner
             values.Add(Column(context, heading, at, keys));
         }
 
+        var unitless = Array.FindIndex(unknown, at => HeadingWords.IsChannel(headings[at].Channel));
+        if (unitless >= 0)
+        {
+            throw TableFaults.LevelUnit(context.HeadingPlace(unknown[unitless]), headings[unknown[unitless]].Text);
+        }
+
         if (unknown.Length > 0)
         {
             throw TableFaults.UnknownHeadings(context.HeadingPlace(unknown[0]), unknown.Select(at => headings[at].Text), headings.Where(heading => heading.IsKnown).Select(heading => heading.Text));
