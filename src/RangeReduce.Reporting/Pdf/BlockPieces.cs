@@ -63,7 +63,7 @@ internal sealed class BlockPieces(float width, StateStyles styles)
                     });
                     break;
                 case ParagraphBlock paragraph:
-                    pieces.Add(new TextPiece(paragraph.Text, paragraph.Lead ? 9.6f : BodySize, width, MarkOf(paragraph.State)) { SpaceBefore = 5f, StartsPage = startsPage });
+                    pieces.Add(new TextPiece(paragraph.Text, paragraph.Lead ? 9.6f : BodySize, width, MarkOf(paragraph.State)) { SpaceBefore = 5f, StartsPage = startsPage, KeepWithNext = paragraph.KeepWithNext });
                     break;
                 case PlotRowBlock row:
                     pieces.Add(new PlotRowPiece(row.Plots, width) { SpaceBefore = 9f, StartsPage = startsPage });

@@ -24,7 +24,7 @@ internal static class TableMeasure
             var mark = column.State is null ? 0f : MarkRoom;
             var cells = table.Rows.Select(row => row.Cells[at]).ToList();
             natural[at] = Math.Max(mark + TextWrapper.Natural(column.Head.AsStrong(), size), Widest(cells, column.Alignment, size)) + 0.5f;
-            least[at] = Math.Min(Math.Max(free * 0.31f, free / count), cells.Select(cell => TextWrapper.WidestWord(cell, size)).Append(mark + TextWrapper.WidestWord(column.Head.AsStrong(), size)).Max() + 0.5f);
+            least[at] = Math.Min(Math.Max(free * 0.34f, free / count), cells.Select(cell => TextWrapper.WidestWord(cell, size)).Append(mark + TextWrapper.WidestWord(column.Head.AsStrong(), size)).Max() + 0.5f);
         }
 
         return natural.Sum() <= free ? Widen(natural, free) : Squeeze(natural, least, free);
