@@ -22,11 +22,6 @@ internal static class PatternSection
                 continue;
             }
 
-            if (blocks.Count > 0)
-            {
-                blocks.Add(new PageBreakBlock());
-            }
-
             blocks.Add(new HeadingBlock("pattern-" + names.Of(state), $"State {state}") { State = state });
             var more = cuts.Count > MostCuts ? $" The first {NumberText.Fixed(MostCuts, 0)} of {NumberText.Fixed(cuts.Count, 0)} cuts are drawn; the others are among the traces." : string.Empty;
             blocks.Add(new ParagraphBlock($"Shown at {context.FrequencyOf(state).Text}.{more}") { KeepWithNext = true });
