@@ -66,19 +66,19 @@ internal sealed class EmbeddedFontContext : IRenderContext, IDisposable
 
     /// <inheritdoc/>
     public void DrawLine(IList<ScreenPoint> points, OxyColor stroke, double thickness, EdgeRenderingMode edgeRenderingMode, double[]? dashArray = null, LineJoin lineJoin = LineJoin.Miter) =>
-        _shapes.DrawLine(points, stroke, thickness, edgeRenderingMode, dashArray, lineJoin);
+        _shapes.DrawLine(points, stroke, thickness, edgeRenderingMode, Dashes(dashArray), lineJoin);
 
     /// <inheritdoc/>
     public void DrawLineSegments(IList<ScreenPoint> points, OxyColor stroke, double thickness, EdgeRenderingMode edgeRenderingMode, double[]? dashArray = null, LineJoin lineJoin = LineJoin.Miter) =>
-        _shapes.DrawLineSegments(points, stroke, thickness, edgeRenderingMode, dashArray, lineJoin);
+        _shapes.DrawLineSegments(points, stroke, thickness, edgeRenderingMode, Dashes(dashArray), lineJoin);
 
     /// <inheritdoc/>
     public void DrawPolygon(IList<ScreenPoint> points, OxyColor fill, OxyColor stroke, double thickness, EdgeRenderingMode edgeRenderingMode, double[]? dashArray = null, LineJoin lineJoin = LineJoin.Miter) =>
-        _shapes.DrawPolygon(points, fill, stroke, thickness, edgeRenderingMode, dashArray, lineJoin);
+        _shapes.DrawPolygon(points, fill, stroke, thickness, edgeRenderingMode, Dashes(dashArray), lineJoin);
 
     /// <inheritdoc/>
     public void DrawPolygons(IList<IList<ScreenPoint>> polygons, OxyColor fill, OxyColor stroke, double thickness, EdgeRenderingMode edgeRenderingMode, double[]? dashArray = null, LineJoin lineJoin = LineJoin.Miter) =>
-        _shapes.DrawPolygons(polygons, fill, stroke, thickness, edgeRenderingMode, dashArray, lineJoin);
+        _shapes.DrawPolygons(polygons, fill, stroke, thickness, edgeRenderingMode, Dashes(dashArray), lineJoin);
 
     /// <inheritdoc/>
     public void DrawRectangle(OxyRect rectangle, OxyColor fill, OxyColor stroke, double thickness, EdgeRenderingMode edgeRenderingMode) =>
@@ -109,5 +109,12 @@ internal sealed class EmbeddedFontContext : IRenderContext, IDisposable
     {
         _ink.Dispose();
         _shapes.Dispose();
+    }
+
+    // The stock context scales dashes twice, by the thickness in device units and by the scale: one of them is taken out here.
+    private double[]? Dashes(double[]? dashArray)
+    {
+        var scale = _shapes.DpiScale;
+        return dashArray is null || scale == 1f ? dashArray : Array.ConvertAll(dashArray, dash => dash / scale);
     }
 }

@@ -77,7 +77,6 @@ public static class HtmlReportWriter
         TableBlock table => HtmlTable.Of(table, styles),
         PlotRowBlock row => $"<div class=\"row\">{string.Concat(row.Plots.Select(plot => Figure(plot, svg[plot.FileName])))}</div>\n",
         RemarkListBlock remarks => $"<ul class=\"remarks\">{string.Concat(remarks.Items.Select(Remark))}</ul>\n",
-        PageBreakBlock => string.Empty,
         _ => throw new InvalidOperationException($"No HTML is known for {block.GetType().Name}."),
     };
 

@@ -2,7 +2,10 @@
 (function () {
   "use strict";
   const minus = "\u2212";
-  const print = (value, decimals) => value.toFixed(Number(decimals)).replace("-", minus);
+  const print = (value, decimals) => {
+    const text = Math.abs(value).toFixed(Number(decimals));
+    return Number(text) !== 0 && value < 0 ? minus + text : text;
+  };
   const numbers = text => text.split(" ").map(Number);
   const make = (name, attributes, text) => {
     const element = document.createElement(name);

@@ -44,49 +44,42 @@ internal sealed class BlockPieces(float width, StateStyles styles)
 
     private void AddBlocks(List<FlowPiece> pieces, IReadOnlyList<ReportBlock> blocks)
     {
-        var startsPage = false;
         foreach (var block in blocks)
         {
             switch (block)
             {
-                case PageBreakBlock:
-                    startsPage = true;
-                    continue;
                 case HeadingBlock heading:
                     pieces.Add(new TextPiece(RichText.Strong(heading.Text), 10.5f, width, MarkOf(heading.State))
                     {
                         KeepWithNext = true,
                         SpaceBefore = 13f,
-                        StartsPage = startsPage,
                         Anchor = heading.Id,
                         Bookmark = new Bookmark(heading.Text, 2, heading.Id),
                     });
                     break;
                 case ParagraphBlock paragraph:
-                    pieces.Add(new TextPiece(paragraph.Text, paragraph.Lead ? 9.6f : BodySize, width, MarkOf(paragraph.State)) { SpaceBefore = 5f, StartsPage = startsPage });
+                    pieces.Add(new TextPiece(paragraph.Text, paragraph.Lead ? 9.6f : BodySize, width, MarkOf(paragraph.State)) { SpaceBefore = 5f, KeepWithNext = paragraph.KeepWithNext });
                     break;
                 case PlotRowBlock row:
-                    pieces.Add(new PlotRowPiece(row.Plots, width) { SpaceBefore = 9f, StartsPage = startsPage });
+                    pieces.Add(new PlotRowPiece(row.Plots, width) { SpaceBefore = 9f });
                     break;
                 case RemarkListBlock remarks:
                     pieces.AddRange(remarks.Items.Select(item => new RemarkPiece(item, width) { SpaceBefore = 3.5f }));
                     break;
                 case TableBlock table:
-                    AddTable(pieces, table, startsPage);
+                    AddTable(pieces, table);
                     break;
                 default:
                     throw new InvalidOperationException($"No piece is known for {block.GetType().Name}.");
             }
-
-            startsPage = false;
         }
     }
 
-    private void AddTable(List<FlowPiece> pieces, TableBlock table, bool startsPage)
+    private void AddTable(List<FlowPiece> pieces, TableBlock table)
     {
         if (table.Caption.Spans.Count > 0)
         {
-            pieces.Add(new TextPiece(table.Caption, BodySize - 0.4f, width) { KeepWithNext = true, SpaceBefore = 10f, StartsPage = startsPage });
+            pieces.Add(new TextPiece(table.Caption, BodySize - 0.4f, width) { KeepWithNext = true, SpaceBefore = 10f });
         }
 
         var layout = new TableLayout(table, width, styles);

@@ -35,7 +35,7 @@ internal sealed class TableLayout
     public StateStyles Styles { get; }
 
     /// <summary>Gives the left end of a column.</summary>
-    public float Left(int column) => Widths.Take(column).Sum() + (column * TableMeasure.Gap);
+    public float Left(int column) => Widths.Take(column).Sum() + (column * TableMeasure.Gap(Widths.Length));
 
     /// <summary>Gives how far a line is moved to the right so that its decimal point stands below the others.</summary>
     public float Shift(int column, TextLine line)

@@ -5,18 +5,18 @@ namespace RangeReduce.Reporting.Pdf;
 /// <summary>Gives the columns of a table their widths.</summary>
 internal static class TableMeasure
 {
-    /// <summary>Space between columns.</summary>
-    public const float Gap = 10f;
-
     /// <summary>Room of the mark in the heading of a state's column.</summary>
     public const float MarkRoom = 9f;
+
+    /// <summary>Gives the space between columns: less where there are many.</summary>
+    public static float Gap(int columns) => columns > 8 ? 6f : 10f;
 
     /// <summary>Measures a table.</summary>
     /// <returns>The width of each column without the gap; with the gaps they fill the line.</returns>
     public static float[] Widths(TableBlock table, float size, float width)
     {
         var count = table.Columns.Count;
-        var free = width - (Gap * (count - 1));
+        var free = width - (Gap(count) * (count - 1));
         var (natural, least) = (new float[count], new float[count]);
         for (var at = 0; at < count; at++)
         {
@@ -24,7 +24,7 @@ internal static class TableMeasure
             var mark = column.State is null ? 0f : MarkRoom;
             var cells = table.Rows.Select(row => row.Cells[at]).ToList();
             natural[at] = Math.Max(mark + TextWrapper.Natural(column.Head.AsStrong(), size), Widest(cells, column.Alignment, size)) + 0.5f;
-            least[at] = Math.Min(Math.Max(free * 0.31f, free / count), cells.Select(cell => TextWrapper.WidestWord(cell, size)).Append(mark + TextWrapper.WidestWord(column.Head.AsStrong(), size)).Max() + 0.5f);
+            least[at] = Math.Min(Math.Max(free * 0.34f, free / count), cells.Select(cell => TextWrapper.WidestWord(cell, size)).Append(mark + TextWrapper.WidestWord(column.Head.AsStrong(), size)).Max() + 0.5f);
         }
 
         return natural.Sum() <= free ? Widen(natural, free) : Squeeze(natural, least, free);

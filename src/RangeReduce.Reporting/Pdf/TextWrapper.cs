@@ -87,13 +87,13 @@ internal static class TextWrapper
         return new(joined);
     }
 
-    // Each word keeps the spaces behind it; a hyphen ends a part of a word.
+    // Each word keeps the spaces behind it; a hyphen, a slash or an underscore ends a part of a word.
     private static IEnumerable<string> Words(string text)
     {
         var start = 0;
         for (var at = 1; at < text.Length; at++)
         {
-            if (text[at] != ' ' && (text[at - 1] == ' ' || (text[at - 1] == '-' && at > start + 3 && char.IsLetter(text[at]))))
+            if (text[at] != ' ' && (text[at - 1] == ' ' || (text[at - 1] is '-' or '/' or '_' && at > start + 3 && char.IsLetterOrDigit(text[at]))))
             {
                 yield return text[start..at];
                 start = at;

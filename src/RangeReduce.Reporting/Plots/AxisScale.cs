@@ -46,10 +46,10 @@ internal readonly record struct AxisScale(double Minimum, double Maximum, double
         var decade = Math.Pow(10.0, Math.Floor(Math.Log10(raw)));
         var factor = (raw / decade) switch
         {
-            <= 1.05 => 1.0,
-            <= 2.1 => 2.0,
-            <= 2.6 => 2.5,
-            <= 5.25 => 5.0,
+            <= 1.4 => 1.0,
+            <= 2.3 => 2.0,
+            <= 3.5 => 2.5,
+            <= 7.0 => 5.0,
             _ => 10.0,
         };
         return factor * decade;

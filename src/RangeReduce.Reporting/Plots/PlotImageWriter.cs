@@ -13,7 +13,8 @@ public static class PlotImageWriter
     /// <summary>Width of a picture in points: 16 cm.</summary>
     internal const float WidthPt = 160f / 25.4f * 72f;
 
-    private const float PixelsAPoint = 300f / 72f;
+    private const float DotsPerInch = 300f;
+    private const float PixelsAPoint = DotsPerInch / 72f;
 
     /// <summary>Writes all plots of a report into a folder, which is made where it is not there.</summary>
     /// <param name="model">The report.</param>
@@ -41,10 +42,7 @@ public static class PlotImageWriter
         plot.Update(true);
         plot.Render(context, new OxyRect(0, 0, WidthPt, height));
 
-        // Plots are mostly flat ground: a light compression with the filter that suits flat rows is as small as a slow one.
         using var pixels = surface.PeekPixels();
-        using var png = pixels.Encode(new SKPngEncoderOptions(SKPngEncoderFilterFlags.Up, 1))
-            ?? throw new InvalidOperationException($"The picture of {figure.FileName} could not be encoded.");
-        return png.ToArray();
+        return PictureEncoder.Encode(pixels.GetPixelSpan(), pixels.Width, pixels.Height, pixels.RowBytes, DotsPerInch);
     }
 }

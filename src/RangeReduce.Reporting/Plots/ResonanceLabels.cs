@@ -28,6 +28,7 @@ internal static class ResonanceLabels
         }
     }
 
+    // The axis grows downward, and offsets and alignments turn over with it: up means down here.
     private static void AddOne(PlotModel plot, ResonanceMark mark, HorizontalAlignment side, OxyColor color)
     {
         plot.Annotations.Add(new PointAnnotation
@@ -48,13 +49,13 @@ internal static class ResonanceLabels
             TextPosition = new DataPoint(mark.X, mark.Y),
             Offset = side switch
             {
-                HorizontalAlignment.Left => new ScreenVector(4, 3),
-                HorizontalAlignment.Right => new ScreenVector(-4, 3),
+                HorizontalAlignment.Left => new ScreenVector(4, -3),
+                HorizontalAlignment.Right => new ScreenVector(-4, -3),
                 // A shallow dip lies among flat curves: its label goes well below them.
-                _ => new ScreenVector(0, mark.Y < 8.0 ? 13 : 5),
+                _ => new ScreenVector(0, mark.Y < 8.0 ? -13 : -5),
             },
             TextHorizontalAlignment = side,
-            TextVerticalAlignment = VerticalAlignment.Top,
+            TextVerticalAlignment = VerticalAlignment.Bottom,
             FontSize = PlotFrame.FontSize - 0.5,
             TextColor = PlotPalette.Ink,
             StrokeThickness = 0,

@@ -46,7 +46,7 @@ internal static class MakingSection
         blocks.AddRange(Cautions().Select(text => new ParagraphBlock(text)));
         blocks.Add(new HeadingBlock("software", "Software"));
         blocks.Add(new ParagraphBlock($"Made by rangereduce {context.Options.Version}. The numbers of this report, with the inputs and the formula of each, are in results.json and figures.csv; the curves are in the folder traces."));
-        return new("making", "How it was made", blocks);
+        return new("making", "How it was made", blocks) { StartsPage = true };
     }
 
     // ISO/IEC 17025, 7.8.2 says what a report states; what the manifest does not give is said to be missing.

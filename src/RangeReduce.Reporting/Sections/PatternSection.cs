@@ -22,14 +22,9 @@ internal static class PatternSection
                 continue;
             }
 
-            if (blocks.Count > 0)
-            {
-                blocks.Add(new PageBreakBlock());
-            }
-
             blocks.Add(new HeadingBlock("pattern-" + names.Of(state), $"State {state}") { State = state });
             var more = cuts.Count > MostCuts ? $" The first {NumberText.Fixed(MostCuts, 0)} of {NumberText.Fixed(cuts.Count, 0)} cuts are drawn; the others are among the traces." : string.Empty;
-            blocks.Add(new ParagraphBlock($"Shown at {context.FrequencyOf(state).Text}.{more}"));
+            blocks.Add(new ParagraphBlock($"Shown at {context.FrequencyOf(state).Text}.{more}") { KeepWithNext = true });
             var shown = cuts.Take(MostCuts).ToList();
             var quantity = context.LevelQuantity(state);
             blocks.AddRange(shown.Select(cut => CutRow(context, quantity, cut, names.Of(state))).OfType<PlotRowBlock>());
@@ -69,7 +64,7 @@ internal static class PatternSection
                 Caption = $"{cut.Text}. {PolarCutPlot.RingText(floor, top, unit)}",
                 AlternativeText = $"{what}, in polar form. {Peak(context, quantity, cut)}",
                 WidthShare = 0.38,
-                Aspect = 1.1,
+                Aspect = 0.98,
                 Readout = new(cut.PhiDeg is null ? "φ" : "θ", "°", 1, unit, 1) { PolarFloor = floor, PolarTop = top },
                 Make = () => PolarCutPlot.Make(curves, legend, floor, top),
             },
@@ -80,7 +75,7 @@ internal static class PatternSection
                 Caption = $"{cut.Text}, the same data over angle.{below}",
                 AlternativeText = $"{what}, over angle. {Peak(context, quantity, cut)}",
                 WidthShare = 0.62,
-                Aspect = 0.66,
+                Aspect = 0.6,
                 Readout = new(cut.PhiDeg is null ? "φ" : "θ", "°", 1, unit, 1),
                 Make = () => CurvePlot.Make(curves, legend, cut.AngleTitle, CurvePlot.Angles(least, last, wide: false), title, levels),
             },

@@ -52,7 +52,7 @@ internal static class UncertaintySection
 
     private static string? Absent(ReportContext context)
     {
-        var measured = context.Reduced.Table.Figures.Where(figure => figure.Source == DataSource.Measured && double.IsFinite(figure.Value)).GroupBy(figure => figure.Quantity)
+        var measured = context.Reduced.Table.Figures.Where(figure => figure.Source == DataSource.Measured && figure.OtherState is null && figure.Quantity != QuantityCatalogue.Deviation && double.IsFinite(figure.Value)).GroupBy(figure => figure.Quantity)
             .Where(group => group.All(figure => !double.IsFinite(figure.Uncertainty.Expanded))).Select(group => group.Key).ToList();
         return measured.Count == 0 ? null
             : $"No term was stated that bears on {Words.List([.. QuantityCatalogue.All.Where(measured.Contains).Select(quantity => quantity.Name)])}: these figures stand without uncertainty.";
