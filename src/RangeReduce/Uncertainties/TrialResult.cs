@@ -23,7 +23,7 @@ internal static class TrialResult
         }
 
         var half = 0.5 * (high - low);
-        var uncertainty = new Uncertainty(half, standard > 0.0 ? half / standard : double.NaN, budget) { Standard = standard, Shares = shares };
+        var uncertainty = new Uncertainty(half, standard > 0.0 && half > 0.0 ? half / standard : double.NaN, budget) { Standard = standard, Shares = shares };
         return Math.Abs((0.5 * (high + low)) - value) <= Lopsided * half ? uncertainty : uncertainty with { Low = low, High = high };
     }
 
