@@ -47,7 +47,7 @@ internal static class RequirementWords
 
         return string.Join(' ', words);
 
-        string Print(double value) => (value * quantity.PrintFactor).ToString("0.####", CultureInfo.InvariantCulture);
+        string Print(double value) => (value * quantity.PrintFactor).ToString("0.####", CultureInfo.InvariantCulture).Replace('-', '\u2212');
 
         string Unit() => quantity.PrintUnit switch
         {
