@@ -26,8 +26,9 @@ public static class RunReduction
         var table = UncertaintyEvaluator.Evaluate(corrected, reduced.Table, (options ?? new()).Trials, cancellationToken);
         StateComparison.Add(table);
         SimulationComparison.Add(table);
+        var curveRemarks = CurveComparison.Add(table);
         var requirements = RequirementEvaluator.Evaluate(corrected, table);
-        Remark[] remarks = [.. corrected.Remarks.Concat(reduced.Remarks.Remarks).Distinct().OrderByDescending(remark => remark.Severity)];
+        Remark[] remarks = [.. corrected.Remarks.Concat(reduced.Remarks.Remarks).Concat(curveRemarks).Distinct().OrderByDescending(remark => remark.Severity)];
         return new(corrected, table, requirements, remarks);
     }
 }

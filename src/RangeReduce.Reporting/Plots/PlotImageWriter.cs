@@ -1,8 +1,6 @@
+using OxyPlot;
 using RangeReduce.Reporting.Fonts;
 using RangeReduce.Reporting.Plots;
-
-using OxyPlot;
-
 using SkiaSharp;
 
 namespace RangeReduce.Reporting;
