@@ -1,7 +1,7 @@
+using OxyPlot;
+
 using RangeReduce.Reporting.Fonts;
 using RangeReduce.Reporting.Plots;
-
-using OxyPlot;
 
 using SkiaSharp;
 

@@ -49,8 +49,8 @@ internal static class ResonanceLabels
             TextPosition = new DataPoint(mark.X, mark.Y),
             Offset = side switch
             {
-                HorizontalAlignment.Left => new ScreenVector(4, -3),
-                HorizontalAlignment.Right => new ScreenVector(-4, -3),
+                HorizontalAlignment.Left => new ScreenVector(1, -5),
+                HorizontalAlignment.Right => new ScreenVector(-1, -5),
                 // A shallow dip lies among flat curves: its label goes well below them.
                 _ => new ScreenVector(0, mark.Y < 8.0 ? -13 : -5),
             },
