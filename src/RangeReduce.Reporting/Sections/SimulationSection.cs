@@ -44,14 +44,16 @@ internal static class SimulationSection
     // Figures of the resonance, and those of the pattern at the frequency at which it is shown; the table of figures holds the rest.
     private static void AddDeviations(List<ReportBlock> blocks, ReportContext context, List<Figure> deviations)
     {
-        var chosen = deviations.Where(figure => IsShown(context, figure)).OrderBy(figure => context.Styles.IndexOf(figure.State)).ToList();
+        var chosen = deviations.Where(figure => IsShown(context, figure))
+            .GroupBy(figure => (figure.Of, figure.State, figure.At, figure.Component)).Select(group => group.MinBy(figure => figure.PhiDeg ?? figure.ThetaDeg ?? double.NegativeInfinity)!)
+            .OrderBy(figure => context.Styles.IndexOf(figure.State)).ToList();
         var quiet = chosen.Count(IsQuiet);
         var known = chosen.Count(figure => double.IsFinite(figure.Uncertainty.Expanded));
         var summary = known == 0
             ? "No uncertainty is stated for the deviations, so none can be called significant."
             : $"Of {NumberText.Fixed(known, 0)} deviations with a stated uncertainty {NumberText.Fixed(quiet, 0)} lie within it; those are printed quiet.";
         var rest = deviations.Count > chosen.Count ? $" The table shows {NumberText.Fixed(chosen.Count, 0)} of {NumberText.Fixed(deviations.Count, 0)} deviations: those at the deepest resonance, on the axis and along the first cut at the frequency at which the pattern is shown; figures.csv has all." : string.Empty;
-        blocks.Add(new ParagraphBlock(summary + rest));
+        blocks.Add(new ParagraphBlock(summary + rest) { KeepWithNext = true });
         var cells = new FigureCell();
         var rows = new List<TableRow>();
         foreach (var figure in chosen)

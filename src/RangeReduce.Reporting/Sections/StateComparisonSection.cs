@@ -23,7 +23,7 @@ internal static class StateComparisonSection
         var blocks = new List<ReportBlock>();
         if (contrasts.Count > 0)
         {
-            blocks.Add(new ParagraphBlock(string.Join(' ', Hands.Select(hand => Sentence(context, hand, contrasts)).Where(text => text.Length > 0))));
+            blocks.Add(new ParagraphBlock(string.Join(' ', Hands.Select(hand => Sentence(context, hand, contrasts)).Where(text => text.Length > 0))) { KeepWithNext = true });
             blocks.Add(Matrix(context));
             blocks.Add(ContrastTable(context, contrasts));
             var plots = Hands.Select(hand => Plot(context, hand, contrasts)).OfType<PlotFigure>().ToList();
