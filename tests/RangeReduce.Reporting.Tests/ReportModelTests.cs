@@ -49,7 +49,7 @@ public sealed class ReportModelTests
     public void Figure_without_number_is_a_dash_and_its_reason_stands_below()
     {
         var table = Blocks<TableBlock>("verdict").First();
-        var row = table.Rows.First(known => known.Cells[0].Plain is "Front-to-back ratio");
+        var row = table.Rows.First(known => known.Cells[0].Plain.StartsWith("Front-to-back ratio", StringComparison.Ordinal));
         Assert.StartsWith("\u2013", row.Cells[4].Plain, StringComparison.Ordinal);
         Assert.Contains(table.Notes, note => note.Plain.EndsWith("The cut has no main lobe above the noise floor.", StringComparison.Ordinal));
     }

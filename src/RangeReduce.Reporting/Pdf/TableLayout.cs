@@ -7,20 +7,20 @@ namespace RangeReduce.Reporting.Pdf;
 /// <summary>Widths and decimal points of a table's columns.</summary>
 internal sealed class TableLayout
 {
-    /// <summary>Size of the letters in tables.</summary>
-    public const float Size = 7.8f;
-
     private readonly float[] _points;
 
     /// <summary>Measures a table.</summary>
     public TableLayout(TableBlock table, float width, StateStyles styles)
     {
         (Columns, Width, Styles) = (table.Columns, width, styles);
-        Widths = TableMeasure.Widths(table, Size, width);
+        (Size, Widths) = TableMeasure.Fit(table, width);
         _points = [.. table.Columns.Select((_, at) => table.Rows
             .Select(row => TableMeasure.AtPoint(row.Cells[at].Plain) is { } parts ? TextMeter.Width(parts.Left, FaceAt(row.Cells[at]), Size) : 0f)
             .DefaultIfEmpty(0f).Max())];
     }
+
+    /// <summary>Gets the size of the letters.</summary>
+    public float Size { get; }
 
     /// <summary>Gets the columns.</summary>
     public IReadOnlyList<TableColumn> Columns { get; }

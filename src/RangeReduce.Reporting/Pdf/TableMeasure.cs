@@ -8,12 +8,28 @@ internal static class TableMeasure
     /// <summary>Room of the mark in the heading of a state's column.</summary>
     public const float MarkRoom = 9f;
 
+    private static readonly float[] Sizes = [7.8f, 7.4f, 7.0f, 6.6f, 6.2f, 5.8f];
+
     /// <summary>Gives the space between columns: less where there are many.</summary>
     public static float Gap(int columns) => columns > 8 ? 6f : 10f;
 
-    /// <summary>Measures a table.</summary>
-    /// <returns>The width of each column without the gap; with the gaps they fill the line.</returns>
-    public static float[] Widths(TableBlock table, float size, float width)
+    /// <summary>Measures a table at the largest size of letters at which no number and no word has to be broken.</summary>
+    /// <returns>The size, and the width of each column without the gap; with the gaps the columns fill the line.</returns>
+    public static (float Size, float[] Widths) Fit(TableBlock table, float width)
+    {
+        foreach (var size in Sizes)
+        {
+            var widths = Widths(table, size, width, out var fits);
+            if (fits || size == Sizes[^1])
+            {
+                return (size, widths);
+            }
+        }
+
+        throw new InvalidOperationException("There is no size of letters for tables.");
+    }
+
+    private static float[] Widths(TableBlock table, float size, float width, out bool fits)
     {
         var count = table.Columns.Count;
         var free = width - (Gap(count) * (count - 1));
@@ -24,8 +40,14 @@ internal static class TableMeasure
             var mark = column.State is null ? 0f : MarkRoom;
             var cells = table.Rows.Select(row => row.Cells[at]).ToList();
             natural[at] = Math.Max(mark + TextWrapper.Natural(column.Head.AsStrong(), size), Widest(cells, column.Alignment, size)) + 0.5f;
-            least[at] = Math.Min(Math.Max(free * 0.34f, free / count), cells.Select(cell => TextWrapper.WidestWord(cell, size)).Append(mark + TextWrapper.WidestWord(column.Head.AsStrong(), size)).Max() + 0.5f);
+
+            // Only words of text may be broken, and only those that would take a third of the line.
+            var words = column.Alignment == ColumnAlignment.DecimalPoint ? Widest(cells, column.Alignment, size)
+                : Math.Min(Math.Max(free * 0.34f, free / count), cells.Select(cell => TextWrapper.WidestWord(cell, size)).DefaultIfEmpty(0f).Max());
+            least[at] = Math.Max(words, mark + TextWrapper.WidestWord(column.Head.AsStrong(), size)) + 0.5f;
         }
+
+        fits = least.Sum() <= free;
 
         return natural.Sum() <= free ? Widen(natural, free) : Squeeze(natural, least, free);
     }

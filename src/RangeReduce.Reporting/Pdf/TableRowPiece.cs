@@ -25,10 +25,10 @@ internal sealed class TableRowPiece : FlowPiece
         for (var at = 0; at < cells.Count; at++)
         {
             var mark = isHead && layout.Columns[at].State is not null ? TableMeasure.MarkRoom : 0f;
-            _cells.Add(TextWrapper.Wrap(cells[at], TableLayout.Size, layout.Widths[at] - mark));
+            _cells.Add(TextWrapper.Wrap(cells[at], _layout.Size, layout.Widths[at] - mark));
         }
 
-        Height = (Math.Max(1, _cells.Max(lines => lines.Count)) * TableLayout.Size * TextWrapper.Leading) + (2f * Padding);
+        Height = (Math.Max(1, _cells.Max(lines => lines.Count)) * _layout.Size * TextWrapper.Leading) + (2f * Padding);
     }
 
     /// <inheritdoc/>
@@ -51,8 +51,8 @@ internal sealed class TableRowPiece : FlowPiece
         {
             // Heads stand on the lower line of a head of several lines.
             var lines = _cells[at];
-            var top = y + Padding + (_isHead ? Height - (2f * Padding) - (lines.Count * TableLayout.Size * TextWrapper.Leading) : 0f);
-            var baseline = top + (TableLayout.Size * (TextMeter.Ascent + 0.07f));
+            var top = y + Padding + (_isHead ? Height - (2f * Padding) - (lines.Count * _layout.Size * TextWrapper.Leading) : 0f);
+            var baseline = top + (_layout.Size * (TextMeter.Ascent + 0.07f));
             var left = x + _layout.Left(at);
             if (_isHead && _layout.Columns[at].State is { } state)
             {
@@ -63,8 +63,8 @@ internal sealed class TableRowPiece : FlowPiece
 
             foreach (var line in lines)
             {
-                brush.DrawLine(line, TableLayout.Size, left + (_isHead ? 0f : _layout.Shift(at, line)), baseline);
-                baseline += TableLayout.Size * TextWrapper.Leading;
+                brush.DrawLine(line, _layout.Size, left + (_isHead ? 0f : _layout.Shift(at, line)), baseline);
+                baseline += _layout.Size * TextWrapper.Leading;
             }
         }
     }

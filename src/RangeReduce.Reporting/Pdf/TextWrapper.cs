@@ -114,6 +114,8 @@ internal static class TextWrapper
             count++;
         }
 
-        return count;
+        // Where a number with its uncertainty is too wide for its column after all, it is parted before the sign and not between digits.
+        var space = word.LastIndexOf(Formatting.UnitText.NoBreakSpace, count - 1);
+        return space > 0 && count < word.Length ? space : count;
     }
 }

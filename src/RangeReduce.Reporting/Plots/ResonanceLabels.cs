@@ -9,58 +9,61 @@ internal static class ResonanceLabels
     // About the width of "1.612 GHz" over the width of the frame.
     private const double LabelShare = 0.13;
 
-    /// <summary>Adds a mark and a label for each resonance.</summary>
+    private const double LineHeight = 9.0;
+
+    /// <summary>Adds a mark and a label for each resonance. Labels of resonances near each other stand below the deepest of them, left and right.</summary>
     public static void Add(PlotModel plot, IReadOnlyList<ResonanceMark> marks, StateStyles styles)
     {
-        var span = plot.Axes[0].Maximum - plot.Axes[0].Minimum;
-        var ordered = marks.OrderBy(mark => mark.X).ToList();
-        for (var at = 0; at < ordered.Count; at++)
+        var near = LabelShare * (plot.Axes[0].Maximum - plot.Axes[0].Minimum);
+        var group = new List<ResonanceMark>();
+        foreach (var mark in marks.OrderBy(mark => mark.X))
         {
-            var nearBefore = at > 0 && ordered[at].X - ordered[at - 1].X < LabelShare * span;
-            var nearAfter = at + 1 < ordered.Count && ordered[at + 1].X - ordered[at].X < LabelShare * span;
-            var side = (nearBefore, nearAfter) switch
+            if (group.Count > 0 && mark.X - group[^1].X >= near)
             {
-                (false, true) => HorizontalAlignment.Right,
-                (true, false) => HorizontalAlignment.Left,
-                _ => HorizontalAlignment.Center,
-            };
-            AddOne(plot, ordered[at], side, styles.ColorOf(ordered[at].State));
+                AddGroup(plot, group, styles);
+                group.Clear();
+            }
+
+            group.Add(mark);
+        }
+
+        AddGroup(plot, group, styles);
+    }
+
+    private static void AddGroup(PlotModel plot, List<ResonanceMark> group, StateStyles styles)
+    {
+        for (var at = 0; at < group.Count; at++)
+        {
+            var mark = group[at];
+            plot.Annotations.Add(new PointAnnotation
+            {
+                X = mark.X,
+                Y = mark.Y,
+                Shape = MarkerType.Circle,
+                Size = 2.6,
+                Fill = PlotPalette.Paper,
+                Stroke = styles.ColorOf(mark.State),
+                StrokeThickness = 1.0,
+                XAxisKey = PlotFrame.XKey,
+                YAxisKey = PlotFrame.YKey,
+            });
+            var side = group.Count == 1 ? HorizontalAlignment.Center : at % 2 == 0 ? HorizontalAlignment.Right : HorizontalAlignment.Left;
+            plot.Annotations.Add(Label(mark, group.Max(other => other.Y), side, at / 2, styles.ColorOf(mark.State)));
         }
     }
 
-    // The axis grows downward, and offsets and alignments turn over with it: up means down here.
-    private static void AddOne(PlotModel plot, ResonanceMark mark, HorizontalAlignment side, OxyColor color)
+    // The axis grows downward, and offsets and alignments turn over with it: up means down here. A shallow dip lies among flat curves: its label goes well below them.
+    private static TextAnnotation Label(ResonanceMark mark, double deepest, HorizontalAlignment side, int line, OxyColor color) => new()
     {
-        plot.Annotations.Add(new PointAnnotation
-        {
-            X = mark.X,
-            Y = mark.Y,
-            Shape = MarkerType.Circle,
-            Size = 2.6,
-            Fill = PlotPalette.Paper,
-            Stroke = color,
-            StrokeThickness = 1.0,
-            XAxisKey = PlotFrame.XKey,
-            YAxisKey = PlotFrame.YKey,
-        });
-        plot.Annotations.Add(new TextAnnotation
-        {
-            Text = mark.Label,
-            TextPosition = new DataPoint(mark.X, mark.Y),
-            Offset = side switch
-            {
-                HorizontalAlignment.Left => new ScreenVector(4, -3),
-                HorizontalAlignment.Right => new ScreenVector(-4, -3),
-                // A shallow dip lies among flat curves: its label goes well below them.
-                _ => new ScreenVector(0, mark.Y < 8.0 ? -13 : -5),
-            },
-            TextHorizontalAlignment = side,
-            TextVerticalAlignment = VerticalAlignment.Bottom,
-            FontSize = PlotFrame.FontSize - 0.5,
-            TextColor = PlotPalette.Ink,
-            StrokeThickness = 0,
-            XAxisKey = PlotFrame.XKey,
-            YAxisKey = PlotFrame.YKey,
-        });
-    }
+        Text = mark.Label,
+        TextPosition = new DataPoint(mark.X, deepest),
+        Offset = new ScreenVector(side switch { HorizontalAlignment.Left => 2, HorizontalAlignment.Right => -2, _ => 0 }, (deepest < 8.0 ? -13 : -5) - (line * LineHeight)),
+        TextHorizontalAlignment = side,
+        TextVerticalAlignment = VerticalAlignment.Bottom,
+        FontSize = PlotFrame.FontSize - 0.5,
+        TextColor = color,
+        StrokeThickness = 0,
+        XAxisKey = PlotFrame.XKey,
+        YAxisKey = PlotFrame.YKey,
+    };
 }

@@ -46,7 +46,7 @@ internal static class MakingSection
         blocks.AddRange(Cautions().Select(text => new ParagraphBlock(text)));
         blocks.Add(new HeadingBlock("software", "Software"));
         blocks.Add(new ParagraphBlock($"Made by rangereduce {context.Options.Version}. The numbers of this report, with the inputs and the formula of each, are in results.json and figures.csv; the curves are in the folder traces."));
-        return new("making", "How it was made", blocks) { StartsPage = true };
+        return new("making", "How it was made", blocks);
     }
 
     // ISO/IEC 17025, 7.8.2 says what a report states; what the manifest does not give is said to be missing.
@@ -82,7 +82,7 @@ internal static class MakingSection
                 new(["Theta component", $"channel {Conventions.Channel(conventions.ThetaPort)}", conventions.PortsFrom]),
                 new(["Phi component", $"channel {Conventions.Channel(conventions.PhiPort)}", conventions.PortsFrom]),
                 new(["Hand", "of the wave that the antenna transmits, judged looking along propagation", "IEEE Std 145"]),
-                new(["Circular and elliptical", $"called circular up to an axial ratio of {UnitText.Join("3", "dB")}", "common practice"]),
+                new(["Circular, elliptical, linear", $"called circular up to an axial ratio of {UnitText.Join("3", "dB")}, close to linear above {UnitText.Join("20", "dB")}, elliptical between", "common practice"]),
                 new(["Axis of the antenna", $"{NumberText.Trimmed(run.AxisDeg, 2)}° along the cuts", "run.toml or 0"]),
                 new(["Range length", run.RangeLengthM is { } length ? UnitText.Join(NumberText.Trimmed(length, 3), "m") : RichText.Quiet("not given"), run.RangeLengthM is null ? NumberText.Missing : "run.toml"]),
                 new(["Largest dimension of the antenna", run.LargestDimensionM is { } dimension ? UnitText.Join(NumberText.Trimmed(dimension, 4), "m") : RichText.Quiet("not given"), run.LargestDimensionM is null ? NumberText.Missing : "run.toml"]),

@@ -66,11 +66,13 @@ internal sealed class ReportContext
     /// <summary>Gives gain where the cuts of a state are calibrated, else level.</summary>
     public Quantity LevelQuantity(string state) => Traces(QuantityCatalogue.Gain, state).Any() ? QuantityCatalogue.Gain : QuantityCatalogue.Level;
 
+    /// <summary>Gives the hand that a state is meant to have; null where that was not stated.</summary>
+    public Hand? IntendedHand(string state) => Run.States.FirstOrDefault(known => string.Equals(known.Name, state, StringComparison.Ordinal))?.IntendedHand;
+
     /// <summary>Gives the co-polar and the cross-polar component of a state: by the intended hand, else by the hand that was found; null where neither is known.</summary>
     public (FieldComponent Co, FieldComponent Cross)? CoCross(string state)
     {
-        var intended = Run.States.FirstOrDefault(known => string.Equals(known.Name, state, StringComparison.Ordinal))?.IntendedHand;
-        var hand = intended ?? FindAtCut(QuantityCatalogue.Hand, state, figure => figure.At == FigurePlace.Axis)?.Hand;
+        var hand = IntendedHand(state) ?? FindAtCut(QuantityCatalogue.Hand, state, figure => figure.At == FigurePlace.Axis)?.Hand;
         return hand switch
         {
             Hand.Right => (FieldComponent.Right, FieldComponent.Left),

@@ -44,16 +44,16 @@ internal static class SimulationSection
     // Figures of the resonance, and those of the pattern at the frequency at which it is shown; the table of figures holds the rest.
     private static void AddDeviations(List<ReportBlock> blocks, ReportContext context, List<Figure> deviations)
     {
-        var chosen = deviations.Where(figure => figure.State is { } state
-            && (figure.At == FigurePlace.Resonance ? (figure.Rank ?? 1) == 1 : figure.FrequencyHz is null ? (figure.Rank ?? 1) == 1 : context.FrequencyOf(state).CutHz is { } cut && ReportContext.Same(figure.FrequencyHz, cut)))
-            .OrderBy(figure => context.Styles.IndexOf(figure.State)).Take(MostRows).ToList();
+        var chosen = deviations.Where(figure => IsShown(context, figure))
+            .GroupBy(figure => (figure.Of, figure.State, figure.At, figure.Component)).Select(group => group.MinBy(figure => figure.PhiDeg ?? figure.ThetaDeg ?? double.NegativeInfinity)!)
+            .OrderBy(figure => context.Styles.IndexOf(figure.State)).ToList();
         var quiet = chosen.Count(IsQuiet);
         var known = chosen.Count(figure => double.IsFinite(figure.Uncertainty.Expanded));
         var summary = known == 0
             ? "No uncertainty is stated for the deviations, so none can be called significant."
             : $"Of {NumberText.Fixed(known, 0)} deviations with a stated uncertainty {NumberText.Fixed(quiet, 0)} lie within it; those are printed quiet.";
-        var rest = deviations.Count > chosen.Count ? $" The table shows {NumberText.Fixed(chosen.Count, 0)} of {NumberText.Fixed(deviations.Count, 0)} deviations: those at the deepest resonance and at the frequency at which the pattern is shown; figures.csv has all." : string.Empty;
-        blocks.Add(new ParagraphBlock(summary + rest));
+        var rest = deviations.Count > chosen.Count ? $" The table shows {NumberText.Fixed(chosen.Count, 0)} of {NumberText.Fixed(deviations.Count, 0)} deviations: those at the deepest resonance, on the axis and along the first cut at the frequency at which the pattern is shown; figures.csv has all." : string.Empty;
+        blocks.Add(new ParagraphBlock(summary + rest) { KeepWithNext = true });
         var cells = new FigureCell();
         var rows = new List<TableRow>();
         foreach (var figure in chosen)
@@ -82,6 +82,24 @@ internal static class SimulationSection
             Notes = cells.Notes,
             Sortable = true,
         });
+    }
+
+    private static bool IsShown(ReportContext context, Figure figure)
+    {
+        if (figure.State is not { } state || (figure.Rank ?? 1) > 1 || figure.Component is FieldComponent.Theta or FieldComponent.Phi || figure.Method is not null)
+        {
+            return false;
+        }
+
+        if (figure.At == FigurePlace.Resonance || figure.FrequencyHz is null)
+        {
+            return true;
+        }
+
+        // What is taken at the maximum of a cut repeats what is taken on the axis, but for the level itself.
+        var repeats = figure.At == FigurePlace.Peak && figure.Of is not ("gain" or "level" or "peak-direction");
+        return !repeats && CutKey.Of(context, state) is [var cut, ..] && ReportContext.Same(figure.FrequencyHz, cut.FrequencyHz)
+            && (figure.PhiDeg is null || Nullable.Equals(figure.PhiDeg, cut.PhiDeg)) && (figure.ThetaDeg is null || Nullable.Equals(figure.ThetaDeg, cut.ThetaDeg));
     }
 
     private static bool IsQuiet(Figure figure) => double.IsFinite(figure.Uncertainty.Expanded) && Math.Abs(figure.Value) < figure.Uncertainty.Expanded;

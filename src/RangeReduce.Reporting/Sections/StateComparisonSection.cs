@@ -23,7 +23,7 @@ internal static class StateComparisonSection
         var blocks = new List<ReportBlock>();
         if (contrasts.Count > 0)
         {
-            blocks.Add(new ParagraphBlock(string.Join(' ', Hands.Select(hand => Sentence(context, hand, contrasts)).Where(text => text.Length > 0))));
+            blocks.Add(new ParagraphBlock(string.Join(' ', Hands.Select(hand => Sentence(context, hand, contrasts)).Where(text => text.Length > 0))) { KeepWithNext = true });
             blocks.Add(Matrix(context));
             blocks.Add(ContrastTable(context, contrasts));
             var plots = Hands.Select(hand => Plot(context, hand, contrasts)).OfType<PlotFigure>().ToList();
@@ -56,10 +56,10 @@ internal static class StateComparisonSection
         return most is null ? string.Empty : $"On the axis, state {most.State} has {FigureText.WithUnit(most)} more {Words.Of(hand)} level than state {most.OtherState}{at}.";
     }
 
-    // The contrast that a reader asks for first: between two states of opposite hand, measured, and of those the largest.
+    // The contrast that a reader asks for first: between two states that are meant to have opposite hands, measured, and of those the largest.
     private static Figure? Telling(ReportContext context, FieldComponent hand, List<Figure> contrasts) => contrasts
         .Where(figure => figure.Component == hand && double.IsFinite(figure.Value))
-        .OrderBy(figure => context.CoCross(figure.State!) is { } one && context.CoCross(figure.OtherState!) is { } other && one != other ? 0 : 1)
+        .OrderBy(figure => context.IntendedHand(figure.State!) is { } one && context.IntendedHand(figure.OtherState!) is { } other && one != other ? 0 : 1)
         .ThenBy(figure => figure.Source).ThenByDescending(figure => figure.Value).FirstOrDefault();
 
     private static TableBlock Matrix(ReportContext context)

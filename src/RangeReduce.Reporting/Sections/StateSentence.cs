@@ -9,6 +9,9 @@ internal static class StateSentence
     /// <summary>An axial ratio up to this is called circular (common practice).</summary>
     public const double CircularDb = 3.0;
 
+    /// <summary>An axial ratio above this is called close to linear: the minor axis is a tenth of the major one.</summary>
+    public const double LinearDb = 20.0;
+
     /// <summary>Writes the sentence about a state.</summary>
     public static string Of(ReportContext context, string state)
     {
@@ -42,6 +45,7 @@ internal static class StateSentence
         {
             null => $"shows no definite hand on the axis at {at}",
             Hand.Linear => $"is linear on the axis at {at}",
+            { } sense when ratio?.Value > LinearDb => $"is close to linear on the axis at {at}, {FigureText.HandWord(sense)}-hand{Intent(context, state, sense)}",
             { } sense => $"is {FigureText.HandWord(sense)}-hand {(ratio?.Value <= CircularDb ? "circular" : "elliptical")} on the axis at {at}{Intent(context, state, sense)}",
         };
         return parts.Count == 0 ? what : $"{what}: {string.Join(", ", parts)}";
@@ -49,8 +53,7 @@ internal static class StateSentence
 
     private static string Intent(ReportContext context, string state, Hand found)
     {
-        var intended = context.Run.States.FirstOrDefault(known => string.Equals(known.Name, state, StringComparison.Ordinal))?.IntendedHand;
-        return intended is { } wanted && wanted != found ? $", though {FigureText.HandWord(wanted)} was intended" : string.Empty;
+        return context.IntendedHand(state) is { } wanted && wanted != found ? $", though {FigureText.HandWord(wanted)} was intended" : string.Empty;
     }
 
     private static string? Level(ReportContext context, string state, Hand? hand)

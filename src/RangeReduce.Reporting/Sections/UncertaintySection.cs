@@ -32,7 +32,7 @@ internal static class UncertaintySection
             blocks.Add(new ParagraphBlock(absent));
         }
 
-        blocks.Add(new ParagraphBlock("Uncertainties follow the Guide to the Expression of Uncertainty in Measurement (JCGM 100) and its Supplement 1 (JCGM 101): the data are disturbed by draws from all terms at once and reduced again, and the interval holds 95 % of the results. Each term alone gives its share. Expanded uncertainties are printed to two significant digits with the value to match. A partial budget holds some of the terms that matter, and is therefore a lower bound."));
+        blocks.Add(new ParagraphBlock("Uncertainties follow the Guide to the Expression of Uncertainty in Measurement (JCGM 100) and its Supplement 1 (JCGM 101): the data are disturbed by draws from all terms at once and reduced again, and the interval holds 95\u00A0% of the results. Each term alone gives its share. Expanded uncertainties are printed to two significant digits with the value to match. A partial budget holds some of the terms that matter, and is therefore a lower bound."));
         return new("uncertainty", "Uncertainty", blocks);
     }
 

@@ -73,7 +73,7 @@ internal static class VerdictSection
         return new(
         [
             outcome.Requirement.Id,
-            outcome.Text,
+            Words.Capital(outcome.Text),
             new RichText([new TextSpan(word.Replace(' ', UnitText.NoBreakSpace)) { Tone = tone, Strong = true }]),
             FigureText.Plain(outcome.Worst, quantity),
             FigureText.Plain(outcome.Margin, quantity),
