@@ -15,18 +15,18 @@ public static class SimulationComparison
         ArgumentNullException.ThrowIfNull(table);
         var simulated = table.Figures
             .Where(figure => figure is { Source: DataSource.Simulated, Method: null, OtherState: null, Open: null } && double.IsFinite(figure.Value))
-            .GroupBy(Key.Of)
+            .GroupBy(FigureKey.Of)
             .ToDictionary(group => group.Key, group => group.First());
         var measured = table.Figures.Where(figure => figure is { Source: DataSource.Measured, Method: null, OtherState: null, Open: null } && double.IsFinite(figure.Value)).ToArray();
         foreach (var figure in measured)
         {
-            if (simulated.TryGetValue(Key.Of(figure), out var counterpart))
+            if (simulated.TryGetValue(FigureKey.Of(figure), out var counterpart))
             {
                 table.Add(figure with
                 {
                     Quantity = QuantityCatalogue.Deviation,
                     Of = figure.Quantity.Id,
-                    Value = Difference(figure, counterpart),
+                    Value = FigureKey.Difference(figure.Quantity, figure.Value, counterpart.Value),
                     Source = null,
                     LowHz = null,
                     HighHz = null,
@@ -39,40 +39,4 @@ public static class SimulationComparison
 
     // A simulation states no uncertainty: a deviation has that of the measured figure, about zero like the deviation itself.
     private static Uncertainty OfDeviation(Figure measured) => measured.Uncertainty with { Low = null, High = null };
-
-    private static double Difference(Figure measured, Figure simulated)
-    {
-        var difference = measured.Value - simulated.Value;
-
-        // An axis of an ellipse turned by 180 degrees is the same axis; a direction turned by 360 degrees is the same direction.
-        var turn = measured.Quantity == QuantityCatalogue.TiltAngle ? 180.0 : measured.Quantity == QuantityCatalogue.PeakDirection ? 360.0 : 0.0;
-        return turn == 0.0 ? difference : Math.IEEERemainder(difference, turn);
-    }
-
-    private sealed record Key(
-        string Quantity,
-        string? State,
-        double? FrequencyHz,
-        double? PhiDeg,
-        double? ThetaDeg,
-        FigurePlace At,
-        FieldComponent Component,
-        double? Threshold,
-        int? Rank,
-        bool? Realized,
-        bool? BackLobe)
-    {
-        public static Key Of(Figure figure) => new(
-            figure.Quantity.Id,
-            figure.State,
-            figure.At == FigurePlace.Resonance ? null : figure.FrequencyHz,
-            figure.PhiDeg,
-            figure.ThetaDeg,
-            figure.At,
-            figure.Component,
-            figure.Threshold,
-            figure.Quantity == QuantityCatalogue.SidelobeLevel ? null : figure.Rank,
-            figure.Realized,
-            figure.BackLobe);
-    }
 }
