@@ -52,14 +52,14 @@ internal static class ResonanceLabels
         }
     }
 
-    // The axis grows downward, and offsets and alignments turn over with it: up means down here. A shallow dip lies among flat curves: its label goes well below them.
+    // The axis grows downward, and offsets turn over with it: a negative one goes down. Alignments do not. A shallow dip lies among flat curves: its label goes well below them.
     private static TextAnnotation Label(ResonanceMark mark, double deepest, HorizontalAlignment side, int line, OxyColor color) => new()
     {
         Text = mark.Label,
         TextPosition = new DataPoint(mark.X, deepest),
-        Offset = new ScreenVector(side switch { HorizontalAlignment.Left => 2, HorizontalAlignment.Right => -2, _ => 0 }, (deepest < 8.0 ? -13 : -5) - (line * LineHeight)),
+        Offset = new ScreenVector(side switch { HorizontalAlignment.Left => 2, HorizontalAlignment.Right => -2, _ => 0 }, (deepest < 8.0 ? -7 : -3) - (line * LineHeight)),
         TextHorizontalAlignment = side,
-        TextVerticalAlignment = VerticalAlignment.Bottom,
+        TextVerticalAlignment = VerticalAlignment.Top,
         FontSize = PlotFrame.FontSize - 0.5,
         TextColor = color,
         StrokeThickness = 0,
