@@ -17,6 +17,7 @@ internal static class CommandLine
         {
             ReduceCommand.Create(terminal, clock, cancellationToken),
             CheckCommand.Create(terminal, cancellationToken),
+            CompareCommand.Create(terminal, cancellationToken),
         };
         root.Options.Add(CommonOptions.Json);
         root.Options.Add(CommonOptions.Quiet);

@@ -45,9 +45,14 @@ public static class UncertaintyEvaluator
         });
 
         var evaluated = new FigureTable();
+        var open = table.Of(QuantityCatalogue.AxialRatio).Where(ratio => found.TryGetValue(ratio.Id, out var uncertainty) && uncertainty is { Low: not null, High: null }).Select(DirectionOf).ToHashSet();
         foreach (var figure in table.Figures)
         {
-            evaluated.Add(found.TryGetValue(figure.Id, out var uncertainty) ? figure with { Uncertainty = uncertainty } : figure);
+            // Where the interval of the axial ratio reaches infinity the ellipse may turn either way: no hand is named.
+            var kept = figure.Hand is Hand.Right or Hand.Left && open.Contains(DirectionOf(figure))
+                ? figure with { Hand = Hand.Linear, Origin = figure.Origin with { Formula = "linear: within its uncertainty the axial ratio is infinite, so neither hand is sure" } }
+                : figure;
+            evaluated.Add(found.TryGetValue(figure.Id, out var uncertainty) ? kept with { Uncertainty = uncertainty } : kept);
         }
 
         foreach (var trace in table.Traces)
@@ -57,6 +62,9 @@ public static class UncertaintyEvaluator
 
         return evaluated;
     }
+
+    private static (string? State, DataSource? Source, double? FrequencyHz, double? PhiDeg, double? ThetaDeg, FigurePlace At, string? Method) DirectionOf(Figure figure) =>
+        (figure.State, figure.Source, figure.FrequencyHz, figure.PhiDeg, figure.ThetaDeg, figure.At, figure.Method);
 
     private static IEnumerable<Func<IEnumerable<(string Id, Uncertainty Value)>>> CutJobs(MeasurementRun run, Figure[] measured, ErrorTerms terms, int trials)
     {
