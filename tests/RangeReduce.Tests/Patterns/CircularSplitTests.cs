@@ -9,7 +9,7 @@ public sealed class CircularSplitTests
     {
         new PatternChannel(values[..6], values[6..12]),
         new PatternChannel(values[12..18], values[18..]),
-    }, seed: "000000000014");
+    });
 
     [Fact]
     public void The_split_keeps_the_power_and_comes_back() => TwoChannels.Sample(pair =>
