@@ -9,8 +9,8 @@ namespace RangeReduce.Reduction;
 /// </remarks>
 public readonly ref struct TurnedSpan
 {
-    /// <summary>The most in dB by which <see cref="PeakOfLevel"/> stands above its sample.</summary>
-    public const double LargestRefinementDb = SteepestTopDb / 8.0;
+    /// <summary>The most in dB by which <see cref="PeakOfLevel"/> stands above its sample: a vertex farther up is made up, as beside a null. No beam that is sampled well rises so far between two samples.</summary>
+    public const double LargestRefinementDb = 1.0;
 
     private const double FullTurnDeg = 360.0;
 
@@ -95,7 +95,8 @@ public readonly ref struct TurnedSpan
     {
         ReadOnlySpan<double> x = [AngleDeg(index - 1), AngleDeg(index), AngleDeg(index + 1)];
         ReadOnlySpan<double> y = [Y(index - 1), Y(index), Y(index + 1)];
-        return y[1] - y[0] <= SteepestTopDb && y[1] - y[2] <= SteepestTopDb ? ParabolicPeak.Refine(x, y) : (x[1], y[1]);
+        var vertex = ParabolicPeak.Refine(x, y);
+        return vertex.Y - y[1] <= LargestRefinementDb ? vertex : (x[1], y[1]);
     }
 
     /// <summary>Walks from a sample to either side until the curve first leaves its bound.</summary>
@@ -162,9 +163,6 @@ public readonly ref struct TurnedSpan
         y[2] = double.IsNegativeInfinity(y[2]) ? Math.Min(y[1], 0.0) - NullDepthDb : y[2];
         return (first, last - first + 1);
     }
-
-    // A vertex stands above its sample by up to an eighth of the drop beside it: beside a null that would be made up. No beam that is sampled well drops so far in a step.
-    private const double SteepestTopDb = 10.0;
 
     // How far under its neighbour an exact null is put for interpolation.
     private const double NullDepthDb = 100.0;

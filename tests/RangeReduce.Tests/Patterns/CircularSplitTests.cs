@@ -25,7 +25,7 @@ public sealed class CircularSplitTests
             Assert.Equal(pair[1].Re[i], phi.Re[i], 1e-9);
             Assert.Equal(pair[1].Im![i], phi.Im![i], 1e-9);
         }
-    });
+    }, seed: "000000000015");
 
     [Fact]
     public void Conjugated_phases_flip_the_hand_and_keep_the_axial_ratio() => TwoChannels.Sample(pair =>
@@ -37,7 +37,7 @@ public sealed class CircularSplitTests
             Assert.Equal(right.Power(i), mirroredLeft.Power(i), 1e-9 * (1.0 + right.Power(i)));
             Assert.Equal(left.Power(i), mirroredRight.Power(i), 1e-9 * (1.0 + left.Power(i)));
         }
-    });
+    }, seed: "000000000016");
 
     // IEEE Std 145: a turn of the antenna about its axis turns theta and phi there, the phase of right one way and of left the other, and no amplitude.
     [Fact]
@@ -59,7 +59,7 @@ public sealed class CircularSplitTests
                 Assert.Equal(0.0, Math.IEEERemainder(turnedTilt - tilt - turnDeg, 180.0), 1e-6);
             }
         }
-    });
+    }, seed: "000000000017");
 
     private static PatternChannel Conjugate(PatternChannel channel) => new(channel.Re, [.. channel.Im!.Select(value => -value)]);
 

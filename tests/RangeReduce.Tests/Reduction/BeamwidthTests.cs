@@ -184,7 +184,8 @@ public sealed class BeamwidthTests
             Assert.Equal(one.PeakDeg, other.PeakDeg, 1e-8);
             Assert.Equal(one.PeakDb - one.BackDb, other.PeakDb - other.BackDb, 1e-8);
         },
-        iter: 200);
+        iter: 200,
+        seed: "000000000012");
 
     // Two Gaussian lobes, 60 degrees wide at half power, the rear one 20 dB down.
     private static double Lobed(double deg)

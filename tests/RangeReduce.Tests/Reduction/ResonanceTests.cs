@@ -157,6 +157,6 @@ public sealed class ResonanceTests
             var scaled = RunReduction.Reduce(SyntheticRun.OfSweep(SyntheticSweep.Of(Array.ConvertAll(grid, hertz => hertz * scale), hertz => resonator(hertz / scale))));
             Assert.Equal(scale, scaled.Single(QuantityCatalogue.ResonanceFrequency).Value / plain.Single(QuantityCatalogue.ResonanceFrequency).Value, 1e-6 * scale);
             Assert.Equal(scale, scaled.Single(QuantityCatalogue.MatchBand).Value / plain.Single(QuantityCatalogue.MatchBand).Value, 1e-6 * scale);
-        }, iter: 30);
+        }, iter: 30, seed: "000000000013");
     }
 }
