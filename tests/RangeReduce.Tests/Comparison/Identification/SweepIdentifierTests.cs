@@ -26,14 +26,14 @@ public sealed class SweepIdentifierTests
     }
 
     [Theory]
-    [InlineData(true, 0.95)]
-    [InlineData(false, 0.85)]
+    [InlineData(true, 0.85)]
+    [InlineData(false, 0.80)]
     public void With_noise_20_dB_below_full_reflection_mirror_states_become_ambiguous_rather_than_wrong(bool hasPhase, double leastRight)
     {
         // The two hands differ by 7 to 9 standard deviations there, all points together, and four noisy repeats make each signature.
         var matrix = Confuse(0.1, hasPhase);
         Assert.All(["left", "right"], state => Assert.InRange(matrix.Wrong(state), 0.0, 0.05));
-        Assert.InRange(0.5 * (matrix.Share("left", "left") + matrix.Share("right", "right")), leastRight - 0.1, 1.0);
+        Assert.InRange(0.5 * (matrix.Share("left", "left") + matrix.Share("right", "right")), leastRight, 1.0);
         Assert.InRange(matrix.Share("left", "Ambiguous") + matrix.Share("right", "Ambiguous"), 0.02, 1.0);
         Assert.Equal(1.0, matrix.Share("half-deployed", "Unknown"));
         Assert.InRange(matrix.Share("stowed", "stowed"), 0.99, 1.0);
