@@ -97,6 +97,11 @@ public static class RunCheck
             yield return new("right-hand component", right, Assignment.ByManifest);
             yield return new("left-hand component", left, Assignment.ByManifest);
         }
+        else if (run.Cuts.Any(cut => cut.Cut.Basis == PolarizationBasis.RightLeft))
+        {
+            yield return new("right-hand component", "right", "headings");
+            yield return new("left-hand component", "left", "headings");
+        }
 
         yield return new("axis of the antenna along the cuts", string.Create(CultureInfo.InvariantCulture, $"{run.AxisDeg:0.###} deg"), manifest?.AxisDeg is null ? "assumed" : Assignment.ByManifest);
     }

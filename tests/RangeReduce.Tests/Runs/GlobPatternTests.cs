@@ -49,7 +49,7 @@ public sealed class GlobPatternTests
             return GlobPattern.Parse(path, Here).Matches(path)
                 && GlobPattern.Parse(string.Join('/', names.Select(_ => "*")), Here).Matches(path)
                 && GlobPattern.Parse("**/*", Here).Matches(path);
-        });
+        }, seed: "000000000033");
 
     [Fact]
     public void Many_stars_do_not_take_long() =>

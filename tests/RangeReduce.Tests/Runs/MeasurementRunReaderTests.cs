@@ -152,6 +152,32 @@ public sealed class MeasurementRunReaderTests : IDisposable
     }
 
     [Fact]
+    public void A_gain_table_and_a_reflection_table_are_known_by_their_headings_wherever_they_lie()
+    {
+        _folder.Cut("right/cut.csv", ["H", "V"], [0]);
+        _folder.Write("right/match.csv", "frequency [GHz],S11 re,S11 im\n1.6,0.1,0.2\n1.7,0.2,0.1\n");
+        _folder.GainTable("papers/certificate.csv");
+        var run = MeasurementRunReader.Read(_folder.Path);
+        Assert.Equal("right", Assert.Single(run.States).Name);
+        Assert.Equal(0.2, Assert.Single(run.Sweeps).Sweep[0, 0, 0].Imaginary);
+        Assert.Equal(3, run.GainStandard!.GainDbi.Length);
+        Assert.Equal("gain-standard-without-levels", Assert.Single(run.Remarks, remark => remark.Severity == RemarkSeverity.Doubt).Code);
+    }
+
+    [Fact]
+    public void Columns_in_words_of_their_own_are_read_as_the_manifest_says()
+    {
+        _folder.Write("right/cut.csv", "F [GHz],Winkel,A,B,C,D\n1.6,-10,0.1,0.2,0.3,0.4\n1.6,0,0.5,0.6,0.7,0.8\n1.6,10,0.1,0.2,0.3,0.4\n");
+        string[] columns = ["Winkel=theta [deg]", "A=h re", "B=h im", "C=v re", "D=v im", "Winkl=theta [deg]"];
+        _folder.Write("run.toml", string.Join('\n', columns.Select(column => $"[[columns]]\nheading = \"{column.Split('=')[0]}\"\nmeaning = \"{column.Split('=')[1]}\"")));
+        var run = MeasurementRunReader.Read(_folder.Path);
+        Assert.Equal([0.3, 0.7, 0.3], Assert.Single(run.Cuts).Cut.Second!.Re);
+        var remark = run.Remarks.Single(remark => remark.Code is "column-not-found");
+        Assert.Equal(16, remark.Place?.Line);
+        Assert.Contains("\"Winkel\"", remark.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void Linear_and_circular_components_of_one_cut_are_two_cuts()
     {
         _folder.Cut("right/linear.csv", ["H", "V"], [0], 1);

@@ -36,28 +36,4 @@ public sealed class NameFactsTests
         var facts = NameFacts.Of(path);
         Assert.Equal((simulated, standard), (facts.IsSimulated, facts.IsGainStandard));
     }
-
-    [Theory]
-    [InlineData("right/cut_phi045.csv", 45.0)]
-    [InlineData("right/cut_phi_22.5.csv", 22.5)]
-    [InlineData("right/cut_phi=-45.csv", -45.0)]
-    [InlineData("right/cut_phi-45.csv", null)]
-    [InlineData("right/az90_h.csv", 90.0)]
-    [InlineData("right/cut.csv", null)]
-    public void The_fixed_angle_is_taken_from_the_file_name_only_where_it_is_unmistakable(string path, double? expected) =>
-        Assert.Equal(expected, NameFacts.Of(path).FixedDeg);
-
-    [Theory]
-    [InlineData("right/cut_1620MHz.csv", 1.62e9)]
-    [InlineData("right/1.62GHz_phi0.csv", 1.62e9)]
-    [InlineData("right/cut_1620.csv", null)]
-    public void The_frequency_is_taken_from_the_file_name_with_its_unit_only(string path, double? expected) =>
-        Assert.Equal(expected, NameFacts.Of(path).FrequencyHz);
-
-    [Theory]
-    [InlineData("right/cut_phi0_H.csv", "h")]
-    [InlineData("right/cut_phi0_rhcp.csv", "right")]
-    [InlineData("right/h_cut.csv", null)]
-    public void The_channel_is_the_last_word_of_the_file_name(string path, string? expected) =>
-        Assert.Equal(expected, NameFacts.Of(path).Channel);
 }

@@ -74,7 +74,7 @@ public sealed class UnitTextTests
     public void What_is_written_reads_back_to_the_last_bit() => (
         from value in Gen.Double.Where(double.IsFinite)
         from dimension in Gen.Enum<UnitDimension>()
-        select (value, dimension)).Sample(pair => UnitText.Parse(UnitText.Write(pair.value, pair.dimension), Here, pair.dimension) == new UnitValue(pair.value, pair.dimension));
+        select (value, dimension)).Sample(pair => UnitText.Parse(UnitText.Write(pair.value, pair.dimension), Here, pair.dimension) == new UnitValue(pair.value, pair.dimension), seed: "000000000034");
 
     [Fact]
     public void No_text_escapes_as_another_kind_of_error() => Gen.String.Sample(text =>
@@ -87,5 +87,5 @@ public sealed class UnitTextTests
         {
             return;
         }
-    });
+    }, seed: "000000000035");
 }

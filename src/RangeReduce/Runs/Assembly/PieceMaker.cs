@@ -1,8 +1,6 @@
-using System.Globalization;
 using RangeReduce.Diagnostics;
 using RangeReduce.Patterns;
 using RangeReduce.Quantities;
-using RangeReduce.Runs.Discovery;
 using RangeReduce.Runs.Manifest;
 using RangeReduce.Runs.Planning;
 
@@ -20,14 +18,13 @@ internal sealed class PieceMaker(ComponentMap map, TimeFactor time, List<Remark>
     /// <summary>Gives the pieces of one cut of a file: one for the linear and one for the circular components, where they are there.</summary>
     public IEnumerable<CutPiece> PiecesOf(PlannedFile file, RawCut raw)
     {
-        var facts = NameFacts.Of(file.Input.Path);
-        if (FrequenciesOf(file, raw, facts) is not { } frequencyHz)
+        if (FrequenciesOf(file, raw) is not { } frequencyHz)
         {
             yield break;
         }
 
-        var fixedDeg = FixedAngleOf(file, raw, facts);
-        var channels = ComponentsOf(file, raw, facts);
+        var fixedDeg = FixedAngleOf(file, raw);
+        var channels = ComponentsOf(file, raw);
         foreach (var (basis, first, second) in new[] { (PolarizationBasis.ThetaPhi, FieldComponent.Theta, FieldComponent.Phi), (PolarizationBasis.RightLeft, FieldComponent.Right, FieldComponent.Left) })
         {
             if (!channels.ContainsKey(first) && !channels.ContainsKey(second))
@@ -50,18 +47,12 @@ internal sealed class PieceMaker(ComponentMap map, TimeFactor time, List<Remark>
         }
     }
 
-    private Dictionary<FieldComponent, PatternChannel> ComponentsOf(PlannedFile file, RawCut raw, NameFacts facts)
+    private Dictionary<FieldComponent, PatternChannel> ComponentsOf(PlannedFile file, RawCut raw)
     {
         var channels = new Dictionary<FieldComponent, PatternChannel>();
         foreach (var (name, samples) in raw.Channels)
         {
             var found = map.Of(name);
-            if (found is null && raw.Channels.Count == 1 && facts.Channel is { } fromName)
-            {
-                found = map.Of(fromName);
-                Remark(file, RemarkSeverity.Note, "channel-from-name", $"The heading does not say which channel this is; the file name says {fromName}.", raw.Lines.First);
-            }
-
             if (found is not { } mapped)
             {
                 Remark(file, RemarkSeverity.Fault, "unknown-channel", $"The channel {FoundText.Show(name)} is no component that is known here ({string.Join(", ", map.Known.Order(StringComparer.Ordinal))}), so it was left out. Name it under [probe] in run.toml.", raw.Lines.First);
@@ -96,34 +87,22 @@ internal sealed class PieceMaker(ComponentMap map, TimeFactor time, List<Remark>
         return new(isTurned ? Negated(samples.Re) : samples.Re, turnIm ? Negated(samples.Im) : samples.Im);
     }
 
-    private double[]? FrequenciesOf(PlannedFile file, RawCut raw, NameFacts facts)
+    private double[]? FrequenciesOf(PlannedFile file, RawCut raw)
     {
         if (!raw.FrequencyHz.Any(double.IsNaN))
         {
             return raw.FrequencyHz;
         }
 
-        if (facts.FrequencyHz is { } named && raw.FrequencyHz.Length == 1)
-        {
-            Remark(file, RemarkSeverity.Note, "frequency-from-name", string.Create(CultureInfo.InvariantCulture, $"The table does not say its frequency; the file name says {named / 1e6:0.######} MHz."), raw.Lines.First);
-            return [named];
-        }
-
         Remark(file, RemarkSeverity.Fault, "no-frequency", "The cut does not say its frequency, so it was left out. Add a frequency column, or write it in the file name, such as 1620MHz.", raw.Lines.First);
         return null;
     }
 
-    private double FixedAngleOf(PlannedFile file, RawCut raw, NameFacts facts)
+    private double FixedAngleOf(PlannedFile file, RawCut raw)
     {
         if (!double.IsNaN(raw.FixedDeg))
         {
             return raw.FixedDeg;
-        }
-
-        if (raw.Axis == CutAxis.Theta && facts.FixedDeg is { } named)
-        {
-            Remark(file, RemarkSeverity.Note, "angle-from-name", string.Create(CultureInfo.InvariantCulture, $"The table does not say at which phi the cut was taken; the file name says {named:0.###} degrees."), raw.Lines.First);
-            return named;
         }
 
         if (!file.IsOfGainStandard)

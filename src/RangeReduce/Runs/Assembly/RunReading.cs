@@ -22,7 +22,9 @@ internal sealed record RunReading(RunPlan Plan, IReadOnlyList<FileReading> Readi
 
         // A copy was not read, so it takes the kind that its original turned out to have.
         readings = [.. readings.Select(reading => copies.Contains(reading.File.Input.Id) ? LikeOriginal(reading, readings) : reading)];
-        var settled = plan with { Files = [.. readings.Select(reading => reading.File)], Remarks = remarks };
+        ColumnStatements.Check(plan.Manifest, raw, remarks);
+        var files = readings.Select(reading => reading.File).ToArray();
+        var settled = plan with { Files = files, States = StatesWithFiles(plan, files, remarks), Remarks = remarks };
         var run = Assemble(settled, readings, remarks);
         if (run.Sweeps.Count + run.Cuts.Count == 0)
         {
@@ -68,6 +70,20 @@ internal sealed record RunReading(RunPlan Plan, IReadOnlyList<FileReading> Readi
             .Select(piece => new StateCut(piece.InputIds, piece.State ?? GainStandard.StateName, piece.Source, piece.Cut));
 
         static bool OfStandard(StateSweep sweep) => string.Equals(sweep.State, GainStandard.StateName, StringComparison.Ordinal);
+    }
+
+    /// <summary>Drops the states that a name alone made and that lost their files when the content turned out to be the gain standard's.</summary>
+    private static IReadOnlyList<ConfigurationState> StatesWithFiles(RunPlan plan, PlannedFile[] files, List<Remark> remarks)
+    {
+        if (plan.Manifest is { States.Count: > 0 })
+        {
+            return plan.States;
+        }
+
+        var left = plan.States.Where(state => Array.Exists(files, file => string.Equals(file.Input.State, state.Name, StringComparison.Ordinal))).ToArray();
+        var dropped = plan.States.Except(left).Select(state => state.Name).ToHashSet(StringComparer.Ordinal);
+        remarks.RemoveAll(remark => remark.State is { } state && dropped.Contains(state) && remark.Severity != RemarkSeverity.Fault);
+        return left;
     }
 
     private static RunInformation InformationOf(RunPlan plan)

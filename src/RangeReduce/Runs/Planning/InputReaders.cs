@@ -1,3 +1,4 @@
+using RangeReduce.Diagnostics;
 using RangeReduce.Networks.Touchstone;
 using RangeReduce.Patterns.Tables;
 using RangeReduce.Runs.Manifest;
@@ -25,7 +26,8 @@ internal sealed class InputReaders : IInputReaders
             return InputKind.Sweep;
         }
 
-        return TableEndings.Contains(ending, StringComparer.OrdinalIgnoreCase) || (!DocumentEndings.Contains(ending, StringComparer.OrdinalIgnoreCase) && TableReader.LooksLikeTable(head)) ? InputKind.Cut : InputKind.Other;
+        var looksLikeTable = !DocumentEndings.Contains(ending, StringComparer.OrdinalIgnoreCase) && TableReader.LooksLikeTable(head);
+        return looksLikeTable ? KindOfTable(path, head) : TableEndings.Contains(ending, StringComparer.OrdinalIgnoreCase) ? InputKind.Cut : InputKind.Other;
     }
 
     /// <inheritdoc/>
@@ -47,6 +49,31 @@ internal sealed class InputReaders : IInputReaders
             Columns = [.. table.Columns.Select(column => new ColumnDescription(column.Heading, column.Unit.Length == 0 ? column.Meaning : $"{column.Meaning} ({column.Unit})"))],
             Remarks = table.Remarks,
         };
+    }
+
+    // The headings tell; where they do not, the reading will say why, and until then a table counts as cuts.
+    private static InputKind KindOfTable(string path, ReadOnlySpan<byte> head)
+    {
+        try
+        {
+            var remarks = new List<Remark>();
+            var input = TableInput.Open(new MemoryStream(head.ToArray(), writable: false), path, remarks);
+            if (TableHeadFinder.Find(input.Head, isWhole: true, new Dictionary<string, string>(StringComparer.Ordinal), out _) is not { } found)
+            {
+                return InputKind.Cut;
+            }
+
+            return TablePlanner.Plan(new(path, found, new(), remarks)).Content switch
+            {
+                TableContent.Sweep => InputKind.Sweep,
+                TableContent.Gain => InputKind.GainTable,
+                _ => InputKind.Cut,
+            };
+        }
+        catch (MeasurementDataException)
+        {
+            return InputKind.Cut;
+        }
     }
 
     private static bool IsTouchstoneEnding(string ending) =>
