@@ -1,3 +1,4 @@
+using System.Diagnostics;
 using CsCheck;
 using RangeReduce.Diagnostics;
 using RangeReduce.Runs;
