@@ -40,16 +40,18 @@ internal static class ReduceCommand
     {
         var target = request.Output ?? Path.Combine("reports", Path.GetFileName(Path.TrimEndingDirectorySeparator(Path.GetFullPath(request.Folder))));
 
-        // Before the work, not after it: a name that is taken is said at once.
-        OutputFolder.CheckPlace(target, request.Force);
+        // Before the work, not after it: a name that is taken by something else is said at once. A report may turn out to be of the very same data.
+        OutputFolder.CheckPlace(target, overwrite: request.Force || File.Exists(Path.Combine(target, "results.json")));
         var watch = new StepWatch(clock);
         var reduced = ProgressLine.Show(terminal, request.Quiet, report =>
         {
             var run = watch.Time("reading", () => MeasurementRunReader.Read(request.Folder, new DirectProgress(share => report("reading", 0.4 * share)), cancellationToken));
+            var overwrite = request.Force || EarlierReport.IsOfSameData(target, run);
+            OutputFolder.CheckPlace(target, overwrite);
             var result = watch.Time("reducing", () => RunReduction.Reduce(run, new() { Trials = request.Trials }, new DirectProgress(share => report("reducing", 0.4 + (0.2 * share))), cancellationToken));
             report("writing", 0.7);
             var stamp = new ReportStamp(clock.GetUtcNow(), ToolVersion.Text, watch.TotalSeconds);
-            watch.Time("writing", () => ReportFolderWriter.Write(result, stamp, request.Paper, target, request.Force, step => report($"writing {step}", 0.75), cancellationToken));
+            watch.Time("writing", () => ReportFolderWriter.Write(result, stamp, request.Paper, target, overwrite, watch.Add, cancellationToken));
             return result;
         });
 

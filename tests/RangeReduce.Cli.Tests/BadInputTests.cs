@@ -110,6 +110,10 @@ public sealed class BadInputTests
         using var scratch = new ScratchFolder();
         scratch.Write("run/good/s11.s1p", GoodSweep);
         Assert.Equal(ExitCode.Done, CommandHarness.Run("reduce", scratch.Of("run"), "--out", scratch.Of("out")).Code);
+
+        // A report of the very same files says the same: it is made again without asking.
+        Assert.Equal(ExitCode.Done, CommandHarness.Run("reduce", scratch.Of("run"), "--out", scratch.Of("out")).Code);
+        scratch.Write("run/good/s11.s1p", GoodSweep.Replace("0.05", "0.06", StringComparison.Ordinal));
         var second = CommandHarness.Run("reduce", scratch.Of("run"), "--out", scratch.Of("out"));
         Assert.Equal(ExitCode.Machine, second.Code);
         Assert.Contains("--force", second.Error, StringComparison.Ordinal);
