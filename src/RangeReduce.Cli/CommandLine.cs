@@ -5,6 +5,8 @@ namespace RangeReduce.Cli;
 /// <summary>The command line: parses, calls, prints; decides nothing.</summary>
 internal static class CommandLine
 {
+    private const string CommandName = "rangereduce";
+
     /// <summary>Runs a command line.</summary>
     /// <param name="args">The arguments.</param>
     /// <param name="terminal">Where to print.</param>
@@ -37,12 +39,17 @@ internal static class CommandLine
         }
 
         terminal.NoColor |= parsed.GetValue(CommonOptions.NoColor);
-        return CommandRunner.Run(terminal, () => parsed.Invoke(new InvocationConfiguration
+
+        // Help and version go through the library, which calls the command by its assembly; our commands print for themselves.
+        using var library = new StringWriter();
+        var code = CommandRunner.Run(terminal, () => parsed.Invoke(new InvocationConfiguration
         {
-            Output = terminal.Output,
+            Output = library,
             Error = terminal.Error,
             EnableDefaultExceptionHandler = false,
             ProcessTerminationTimeout = null,
         }));
+        terminal.Output.Write(library.ToString().Replace(RootCommand.ExecutableName, CommandName, StringComparison.Ordinal));
+        return code;
     }
 }

@@ -14,6 +14,14 @@ public sealed class CommandLineTests
         Assert.Matches(@"^\d+\.\d+\.\d+\s*$", run.Output);
     }
 
+    [Fact]
+    public void Help_calls_the_command_by_its_name()
+    {
+        var run = CommandHarness.Run("reduce", "--help");
+        Assert.Equal(ExitCode.Done, run.Code);
+        Assert.Contains("rangereduce reduce <FOLDER>", run.Output, StringComparison.Ordinal);
+    }
+
     [Theory]
     [InlineData("reduce")]
     [InlineData("reduec", "x")]
