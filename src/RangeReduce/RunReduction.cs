@@ -23,8 +23,10 @@ public static class RunReduction
         var corrected = SimulatedMismatchCorrection.Apply(GainStandardCorrection.Apply(run));
         var reduced = RunReducer.Reduce(corrected, progress, cancellationToken);
         HandAudit.Add(corrected, reduced);
+        RangeAudit.Add(corrected, reduced);
         var table = UncertaintyEvaluator.Evaluate(corrected, reduced.Table, (options ?? new()).Trials, cancellationToken);
         StateComparison.Add(table);
+        PolarizationMatch.Add(table);
         SimulationComparison.Add(table);
         var curveRemarks = CurveComparison.Add(table);
         var requirements = RequirementEvaluator.Evaluate(corrected, table);

@@ -60,6 +60,19 @@ internal static class RequirementFilter
             && (requirement is not { BandLowHz: { } low, BandHighHz: { } high } || (trace.FrequencyHz >= low - SameFrequencyHz && trace.FrequencyHz <= high + SameFrequencyHz))),
     ];
 
+    /// <summary>Gives the measured figures over a cone that answer a requirement over that cone.</summary>
+    public static Figure[] ConeFigures(Requirement requirement, FigureTable table, double coneDeg) =>
+    [
+        .. table.Figures.Where(figure =>
+            figure.Quantity == requirement.Quantity
+            && figure is { At: FigurePlace.Cone, Source: DataSource.Measured }
+            && string.Equals(figure.Method, Reduction.Cuts.ConeReducer.MethodOf(coneDeg), StringComparison.Ordinal)
+            && double.IsFinite(figure.Value)
+            && Matches(requirement.State, figure.State)
+            && (requirement.Component == FieldComponent.None || figure.Component == requirement.Component)
+            && InBand(requirement, figure)),
+    ];
+
     private static bool Matches(string? wanted, string? state) => wanted is null || string.Equals(wanted, state, StringComparison.Ordinal);
 
     // Without a component a gain is that of all the power; for other quantities any row will do.

@@ -111,6 +111,14 @@ internal sealed record RequirementPoints(IReadOnlyList<RequirementPoint> Points,
             }
         }
 
+        // The figures over the cone say the same in one row a frequency, and are all there is for a ratio that has no curve along the angle.
+        Figure[] figures = RequirementFilter.ConeFigures(requirement, table, coneDeg);
+        if (uncovered is null && figures.Length > 0 && curves.All(curve => figures.Any(figure => figure.FrequencyHz == curve.FrequencyHz && string.Equals(figure.State, curve.State, StringComparison.Ordinal))))
+        {
+            points = [.. figures.Select(figure => new RequirementPoint(figure.Value, figure.FrequencyHz, figure.DirectionDeg, figure.State, figure.Id))];
+            return new(points, BandGap(requirement, figures.Select(figure => figure.FrequencyHz)));
+        }
+
         return new(points, uncovered ?? BandGap(requirement, curves.Select(curve => curve.FrequencyHz)));
 
         void Take(Trace curve, double angleDeg, double value)

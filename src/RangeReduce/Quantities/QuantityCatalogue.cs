@@ -100,12 +100,27 @@ public static class QuantityCatalogue
     /// <summary>Curve agreement.</summary>
     public static readonly Quantity CurveAgreement = new("curve-agreement", "curve agreement", "GDM", "1", "Global difference measure of Feature Selective Validation; 0 is identity.", "IEEE Std 1597.1") { Decimals = 3, Preference = Preference.Less };
 
+    /// <summary>Match band that the quality factor predicts.</summary>
+    public static readonly Quantity PredictedMatchBand = Frequency("predicted-match-band", "match band from the quality factor", "B_Q", "Width of the match band that the quality factor of an isolated resonance predicts, f_0 · 2√β/Q with √β = g/√(1 − g²) and g the reflection coefficient of the threshold.", "Yaghjian and Best, IEEE Trans. AP 53(4), 2005") with { Decimals = 1, PrintUnit = "MHz", PrintFactor = 1e-6 };
+
+    /// <summary>Envelope correlation.</summary>
+    public static readonly Quantity EnvelopeCorrelation = new("envelope-correlation", "envelope correlation", "ρ_e", "1", "Square of the correlation of the far fields of two ports, from the scattering parameters; holds for lossless antennas in a uniform, unpolarized surrounding.", "Blanch, Romeu and Corbella, Electron. Lett. 39, 2003") { Decimals = 4, Preference = Preference.Less };
+
+    /// <summary>Gain band.</summary>
+    public static readonly Quantity GainBand = Frequency("gain-band", "gain band", "B_G", "Width of the connected run of frequencies about the highest gain on the axis over which the gain is at most the threshold below it.", Practice) with { Preference = Preference.More, Decimals = 1, PrintUnit = "MHz", PrintFactor = 1e-6 };
+
+    /// <summary>Beam squint.</summary>
+    public static readonly Quantity BeamSquint = new("beam-squint", "beam squint", "δ", "deg", "Signed angle along the cut from the stated axis to the beam: to the maximum or to the middle of the half-power directions.", Ieee145) { PrintUnit = "°", Decimals = 1 };
+
+    /// <summary>Polarization efficiency.</summary>
+    public static readonly Quantity PolarizationEfficiency = new("polarization-efficiency", "polarization efficiency", "p", "dB", "Power that an antenna of the one polarization takes from a wave of the other over what a matched one would take; never positive.", Ieee145);
+
     private static readonly Quantity[] Entries =
     [
         ResonanceFrequency, ReturnLoss, Vswr, MismatchLoss, InputResistance, InputReactance, QualityFactor, MatchBand, MatchBandFraction, Isolation,
         Level, Gain, PeakDirection, HalfPowerBeamwidth, SidelobeLevel, FrontToBackRatio, AxialRatio, TiltAngle, Hand, CrossPolarRatio,
         AxialRatioBeamwidth, AxialRatioBand, Directivity, RadiationEfficiency, SwitchingContrast, SwitchingReduction, Deviation, FrequencyScale,
-        CurveAgreement, ReflectionReal, ReflectionImaginary,
+        CurveAgreement, ReflectionReal, ReflectionImaginary, PredictedMatchBand, EnvelopeCorrelation, GainBand, BeamSquint, PolarizationEfficiency,
     ];
 
     private static readonly Dictionary<string, Quantity> ById = Entries.ToDictionary(entry => entry.Id, StringComparer.Ordinal);

@@ -2,6 +2,7 @@ using RangeReduce.Diagnostics;
 using RangeReduce.Patterns;
 using RangeReduce.Quantities;
 using RangeReduce.Reduction.Cuts;
+using RangeReduce.Reduction.Sphere;
 using RangeReduce.Reduction.Sweeps;
 using RangeReduce.Runs;
 
@@ -87,7 +88,13 @@ public static class RunReducer
 
             foreach (var grid in reduced.GroupBy(cut => cut.Cut.FrequencyHz, FrequencyGridComparer.Instance))
             {
-                AxisReducer.Reduce([.. grid], method, context);
+                ReducedCut[] together = [.. grid];
+                AxisReducer.Reduce(together, method, context);
+                if (method is null)
+                {
+                    ConeReducer.Reduce(together, context);
+                    DirectivityReducer.Reduce(together, context);
+                }
             }
         }
 

@@ -68,7 +68,7 @@ public static class UncertaintyEvaluator
 
     private static IEnumerable<Func<IEnumerable<(string Id, Uncertainty Value)>>> CutJobs(MeasurementRun run, Figure[] measured, ErrorTerms terms, int trials)
     {
-        var byInput = measured.Where(figure => figure.FrequencyHz is not null && figure.At != FigurePlace.Resonance).ToLookup(figure => (figure.State, figure.FrequencyHz));
+        var byInput = measured.Where(figure => figure.FrequencyHz is not null && figure.At is not FigurePlace.Resonance and not FigurePlace.Cone).ToLookup(figure => (figure.State, figure.FrequencyHz));
         var axisOwners = new HashSet<(string?, double?, string?)>();
         foreach (var source in run.Cuts.Where(cut => cut.Source == DataSource.Measured && cut.Cut is { First: not null, Second: not null }))
         {

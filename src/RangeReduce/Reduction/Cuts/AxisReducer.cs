@@ -73,6 +73,7 @@ public static class AxisReducer
 
         AddTraces();
         AddBand();
+        AddGainBands();
 
         void AddTraces()
         {
@@ -97,6 +98,31 @@ public static class AxisReducer
             Method = method,
             Origin = context.OriginOfCut(inputs, formula),
         });
+
+        void AddGainBands()
+        {
+            if (level != QuantityCatalogue.Gain)
+            {
+                return;
+            }
+
+            var rightIsCo = intended is Hand.Right || (intended is null or Hand.Linear && right.Where(double.IsFinite).Sum() >= left.Where(double.IsFinite).Sum());
+            var gain = new Figure
+            {
+                Quantity = level,
+                State = owner.State,
+                Source = owner.Source,
+                At = FigurePlace.Axis,
+                Component = rightIsCo ? FieldComponent.Right : FieldComponent.Left,
+                Method = method,
+                Realized = owner.Cut.IsRealized,
+                Origin = context.OriginOfCut(inputs, "connected run about the highest co-polar gain on the axis with gain at most threshold below it; edges by a cubic between frequencies"),
+            };
+            foreach (var (threshold, band) in GainBandFigure.Of(frequencies, Array.ConvertAll(rightIsCo ? right : left, Decibels.OfAmplitude)))
+            {
+                context.Table.Add(GainBandFigure.Make(gain, threshold, band));
+            }
+        }
 
         // Cross over co of the stronger hand: its square has no kink where the axial ratio is infinite, and the hand may not turn inside a band.
         void AddBand()

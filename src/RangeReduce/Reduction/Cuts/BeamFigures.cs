@@ -65,6 +65,10 @@ internal static class BeamFigures
             Component = main,
             At = FigurePlace.Peak,
         });
+        if (keys.Source.Cut.Axis == Patterns.CutAxis.Theta && !keys.IsBeside)
+        {
+            SquintFigure.Add(slice, keys, main, beam);
+        }
     }
 
     private static void AddWidth(CutSlice slice, CutKeys keys, FieldComponent main, Beam beam)

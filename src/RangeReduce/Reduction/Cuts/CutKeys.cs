@@ -32,6 +32,9 @@ internal sealed class CutKeys(StateCut source, string? method, ReductionContext 
         ? "(fixed angle not given)"
         : FormattableString.Invariant($"{(Source.Cut.Axis == CutAxis.Theta ? "phi" : "theta")} = {Source.Cut.FixedDeg:0.##} deg");
 
+    /// <summary>Gives whether the cut stands beside others of the same state that give the figures without a method.</summary>
+    public bool IsBeside => method is not null;
+
     /// <summary>Makes a figure with the keys of the cut.</summary>
     public Figure Figure(Quantity quantity, double frequencyHz, double value, string formula) => new()
     {

@@ -25,6 +25,8 @@ public static class ReflectionReducer
         {
             ReducePort(input, port, context);
         }
+
+        PortPairReducer.Reduce(input, context);
     }
 
     private static void ReducePort(StateSweep input, int port, ReductionContext context)
@@ -51,6 +53,7 @@ public static class ReflectionReducer
         }
 
         AddBands(input, curve, resonances, method, context);
+        QualityReducer.Reduce(input, curve, resonances, method, context);
     }
 
     private static void AddResonance(StateSweep input, ReflectionCurve curve, Resonance resonance, int rank, string? method, ReductionContext context)
