@@ -84,7 +84,7 @@ public static class CurveComparison
             Uncertainty = new(half, 2.0, BudgetState.Partial) { Standard = 0.5 * half },
             Origin = OriginOf(measured, simulated, ScaleFormula),
         });
-        remarks.AddRange(scale.Remarks.Select(remark => remark with { State = measured.State }));
+        remarks.AddRange(scale.Remarks.Select(remark => remark with { State = measured.State, Text = $"Return loss of state {measured.State}: {char.ToLowerInvariant(remark.Text[0])}{remark.Text[1..]}" }));
     }
 
     private static void AddAgreement(FigureTable table, Trace measured, Trace simulated, double[] measuredY, double[] simulatedY, List<Remark> remarks)
