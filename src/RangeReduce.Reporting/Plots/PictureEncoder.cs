@@ -45,7 +45,7 @@ internal static class PictureEncoder
     private static byte[] Compress(ReadOnlySpan<byte> rgba, int width, int height, int rowBytes, PicturePalette palette)
     {
         using var data = new MemoryStream();
-        using (var zlib = new ZLibStream(data, CompressionLevel.Optimal, leaveOpen: true))
+        using (var zlib = new ZLibStream(data, CompressionLevel.Fastest, leaveOpen: true))
         {
             var row = new byte[1 + width];
             for (var y = 0; y < height; y++)

@@ -10,6 +10,7 @@ public sealed class CutSlice
     private readonly ReducedCut _cut;
     private readonly int _start;
     private readonly Dictionary<FieldComponent, double[]> _levels = [];
+    private readonly Dictionary<FieldComponent, double[]> _amplitudes = [];
 
     /// <summary>Takes a cut at one frequency.</summary>
     /// <param name="cut">The cut.</param>
@@ -97,7 +98,12 @@ public sealed class CutSlice
     /// <returns>The amplitude (square root of the power); NaN outside the cut and next to a missing sample.</returns>
     public double AmplitudeAt(FieldComponent component, double angleDeg)
     {
-        var amplitude = Array.ConvertAll(LevelDb(component), Decibels.ToAmplitude);
+        if (!_amplitudes.TryGetValue(component, out var amplitude))
+        {
+            amplitude = Array.ConvertAll(LevelDb(component), Decibels.ToAmplitude);
+            _amplitudes.Add(component, amplitude);
+        }
+
         return Math.Max(0.0, ValueAt(amplitude, angleDeg));
     }
 

@@ -93,7 +93,7 @@ internal static class QualityReducer
     internal static double LeastQuality(double size) => 0.5 * ((1.0 / (size * size * size)) + (2.0 / size));
 
     private static void Say(ReductionContext context, StateSweep input, string code, FormattableString rest) => context.Remarks.Add(
-        RemarkSeverity.Doubt,
+        code is "quality-against-band" ? RemarkSeverity.Note : RemarkSeverity.Doubt, // two resonances close together are common, and the band itself is sure
         code,
         $"The {input.Source.Word()} resonance of state {input.State} {rest.ToString(CultureInfo.InvariantCulture)}",
         input.State,
