@@ -33,6 +33,9 @@ internal static class StateComparisonSection
             }
         }
 
+        // One frequency a state, as everywhere in print; figures.csv has all.
+        others = [.. others.Where(figure => figure.Source is null or DataSource.Measured
+            && (figure.FrequencyHz is null || (figure.State is { } state && context.FrequencyOf(state).CutHz is { } cut && ReportContext.Same(figure.FrequencyHz, cut))))];
         if (others.Count > 0)
         {
             blocks.Add(OtherTable(others));
@@ -150,7 +153,7 @@ internal static class StateComparisonSection
     {
         var cells = new FigureCell();
         return new(
-            "Other differences between states.",
+            "Other measured relations between states, at the frequency at which the pattern of the first is shown.",
             [new("State"), new("Against"), new("Quantity"), new("Value", ColumnAlignment.DecimalPoint), new("Unit")],
             [.. figures.Select(figure => new TableRow([figure.State ?? string.Empty, figure.OtherState!, Glossary.Label(figure), cells.OfKnownSource(figure), FigureText.Unit(figure)]))])
         {
