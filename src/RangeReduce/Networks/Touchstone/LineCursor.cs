@@ -40,8 +40,8 @@ internal ref struct LineCursor(ReadOnlySpan<byte> bytes, string file)
         return true;
     }
 
-    /// <summary>Gives the place of the line as a whole.</summary>
-    public readonly SourcePlace Place() => new(_file, Number);
+    /// <summary>Gives the place of the first character of the line that is not blank.</summary>
+    public readonly SourcePlace Place() => new(_file, Number, Math.Max(Line.IndexOfAnyExcept((byte)' ', (byte)'\t'), 0) + 1);
 
     /// <summary>Gives the place of an item, which must be a part of the line.</summary>
     public readonly SourcePlace PlaceOf(ReadOnlySpan<byte> item)

@@ -16,7 +16,7 @@ internal static class NumberReader
     {
         Span<byte> copy = stackalloc byte[64];
         var digits = item.Length > 0 && item[0] == (byte)'+' ? item[1..] : item;
-        if (!HasShape(digits, out var exponentAt, out var isFortran))
+        if (!HasShape(digits, out var exponentAt, out var isFortran) || item.StartsWith("+-"u8))
         {
             throw item.Contains((byte)',') ? TouchstoneErrors.DecimalComma(place, TouchstoneErrors.Quote(item)) : TouchstoneErrors.BadNumber(place, TouchstoneErrors.Quote(item));
         }

@@ -20,6 +20,9 @@ internal sealed record OptionLine
     /// <summary>Gets the line it stands in.</summary>
     public int Line { get; init; }
 
+    /// <summary>Gets the column it begins in.</summary>
+    public int Column { get; init; }
+
     /// <summary>Reads an option line.</summary>
     /// <param name="text">The line from behind the <c>#</c>, without comment.</param>
     /// <param name="line">The cursor that gives places.</param>
@@ -27,9 +30,10 @@ internal sealed record OptionLine
     /// <exception cref="MeasurementDataException">An item is unknown or a reference is missing.</exception>
     public static OptionLine Read(ReadOnlySpan<byte> text, LineCursor line, Action<string, string> remark)
     {
-        var option = new OptionLine { Line = line.Number };
+        var option = new OptionLine { Line = line.Number, Column = line.Place().Column };
         var references = new List<double>();
         var afterR = false;
+        var (hasUnit, hasKind, hasFormat) = (false, false, false);
         var items = new ItemCursor(text);
         while (items.Next(out var item))
         {
@@ -40,17 +44,35 @@ internal sealed record OptionLine
             }
             else if (item.Length == 1 && (item[0] | 0x20) == 'r')
             {
-                afterR = true;
+                RefuseRepeated(ref afterR, item, place);
             }
             else if ((item[0] | 0x20) == 'r' && item.Length > 1 && item[1] is (byte)'.' or (>= (byte)'0' and <= (byte)'9'))
             {
                 remark("reference-glued", "The reference impedance is written without a blank behind R.");
+                RefuseRepeated(ref afterR, item, place);
                 references.Add(Reference(item[1..], place));
-                afterR = true;
             }
             else
             {
+                // Only the number right behind R is bound to it: R left alone is no reference.
+                if (afterR && references.Count == 0)
+                {
+                    throw TouchstoneErrors.BadReference(place, TouchstoneErrors.Quote(item));
+                }
+
                 option = WithItem(option, item, place);
+                switch (item.Length, item[^1] | 0x20)
+                {
+                    case (_, 'z') when item.Length > 1:
+                        RefuseRepeated(ref hasUnit, item, place);
+                        break;
+                    case (1, _):
+                        RefuseRepeated(ref hasKind, item, place);
+                        break;
+                    default:
+                        RefuseRepeated(ref hasFormat, item, place);
+                        break;
+                }
             }
         }
 
@@ -61,6 +83,10 @@ internal sealed record OptionLine
 
         return references.Count == 0 ? option : option with { ReferenceOhm = [.. references] };
     }
+
+    /// <summary>Two units or two formats on one line contradict each other; which one holds is not guessed.</summary>
+    private static void RefuseRepeated(ref bool seen, ReadOnlySpan<byte> item, SourcePlace place) =>
+        seen = !seen ? true : throw TouchstoneErrors.RepeatedOption(place, TouchstoneErrors.Quote(item));
 
     private static double Reference(ReadOnlySpan<byte> item, SourcePlace place)
     {

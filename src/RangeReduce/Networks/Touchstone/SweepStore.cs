@@ -3,12 +3,11 @@ using RangeReduce.Diagnostics;
 namespace RangeReduce.Networks.Touchstone;
 
 /// <summary>Collects frequencies and matrices into growing planar arrays.</summary>
-/// <param name="file">File for messages.</param>
 /// <param name="options">Limits.</param>
 /// <param name="layout">Where the pairs of a record go.</param>
 /// <param name="ports">Number of ports.</param>
 /// <param name="format">How a pair makes a complex value.</param>
-internal sealed class SweepStore(string file, TouchstoneOptions options, MatrixLayout layout, int ports, ParameterFormat format)
+internal sealed class SweepStore(TouchstoneOptions options, MatrixLayout layout, int ports, ParameterFormat format)
 {
     private double[] _frequency = new double[64];
     private double[] _re = new double[64 * ports * ports];
@@ -18,6 +17,9 @@ internal sealed class SweepStore(string file, TouchstoneOptions options, MatrixL
     /// <summary>Gets the number of frequencies.</summary>
     public int Count { get; private set; }
 
+    /// <summary>Gets how many records were taken, repeated ones included.</summary>
+    public int Records { get; private set; }
+
     /// <summary>Gets the last frequency in hertz; −1 before the first.</summary>
     public double LastHz => Count == 0 ? -1.0 : _frequency[Count - 1];
 
@@ -26,25 +28,26 @@ internal sealed class SweepStore(string file, TouchstoneOptions options, MatrixL
 
     /// <summary>Takes a record.</summary>
     /// <param name="numbers">Frequency in hertz, then the pairs; they are changed.</param>
-    /// <param name="line">Line of the record.</param>
-    /// <exception cref="MeasurementDataException">The frequency does not rise, or there is too much.</exception>
-    public void Add(Span<double> numbers, int line)
+    /// <param name="place">Place of the record.</param>
+    /// <returns>False where the point repeats the one before it value by value and was left out.</returns>
+    /// <exception cref="MeasurementDataException">The frequency does not rise, a level is too high for a number, or there is too much.</exception>
+    public bool TryAdd(Span<double> numbers, SourcePlace place)
     {
         var frequency = numbers[0];
         if (frequency < 0.0)
         {
-            throw TouchstoneErrors.BadFrequency(new(file, line), FormattableString.Invariant($"{frequency:R} Hz"));
+            throw TouchstoneErrors.BadFrequency(place, FormattableString.Invariant($"{frequency:R} Hz"));
         }
 
-        if (frequency <= LastHz)
+        if (frequency < LastHz)
         {
-            throw TouchstoneErrors.FrequencyNotIncreasing(new(file, line), frequency, LastHz, _lineBefore);
+            throw TouchstoneErrors.FrequencyNotIncreasing(place, frequency, LastHz, _lineBefore);
         }
 
         var cells = ports * ports;
         if ((Count + 1L) * cells > options.MostValues)
         {
-            throw TouchstoneErrors.TooMuch(new(file, line), FormattableString.Invariant($"more than {options.MostValues} values"), "fewer");
+            throw TouchstoneErrors.TooMuch(place, FormattableString.Invariant($"more than {options.MostValues} values"), "fewer");
         }
 
         if (Count == _frequency.Length)
@@ -55,10 +58,22 @@ internal sealed class SweepStore(string file, TouchstoneOptions options, MatrixL
         }
 
         var pairs = numbers[1..];
-        ToRealImaginary(pairs);
-        layout.Spread(pairs, _re.AsSpan(Count * cells, cells), _im.AsSpan(Count * cells, cells));
+        Records++;
+        ToRealImaginary(pairs, place);
+        var re = _re.AsSpan(Count * cells, cells);
+        var im = _im.AsSpan(Count * cells, cells);
+        layout.Spread(pairs, re, im);
+        if (frequency == LastHz)
+        {
+            var before = (Count - 1) * cells;
+            return re.SequenceEqual(_re.AsSpan(before, cells)) && im.SequenceEqual(_im.AsSpan(before, cells))
+                ? false
+                : throw TouchstoneErrors.FrequencyNotIncreasing(place, frequency, LastHz, _lineBefore);
+        }
+
         _frequency[Count++] = frequency;
-        _lineBefore = line;
+        _lineBefore = place.Line;
+        return true;
     }
 
     /// <summary>Gives the arrays, cut to size.</summary>
@@ -71,7 +86,7 @@ internal sealed class SweepStore(string file, TouchstoneOptions options, MatrixL
         return (_frequency, _re, _im);
     }
 
-    private void ToRealImaginary(Span<double> pairs)
+    private void ToRealImaginary(Span<double> pairs, SourcePlace place)
     {
         if (format == ParameterFormat.RealImaginary)
         {
@@ -81,6 +96,11 @@ internal sealed class SweepStore(string file, TouchstoneOptions options, MatrixL
         for (var i = 0; i + 1 < pairs.Length; i += 2)
         {
             var magnitude = format == ParameterFormat.DecibelAngle ? Math.Pow(10.0, pairs[i] / 20.0) : pairs[i];
+            if (!double.IsFinite(magnitude))
+            {
+                throw TouchstoneErrors.BadNumber(place, FormattableString.Invariant($"a level of {pairs[i]} dB"));
+            }
+
             HasNegativeMagnitude |= magnitude < 0.0;
             var (sin, cos) = double.SinCosPi(pairs[i + 1] / 180.0);
             (pairs[i], pairs[i + 1]) = (magnitude * cos, magnitude * sin);

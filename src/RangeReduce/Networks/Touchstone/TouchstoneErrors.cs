@@ -16,6 +16,15 @@ internal static class TouchstoneErrors
     public static MeasurementDataException UnknownOption(SourcePlace place, string found) =>
         new(place, "unknown-option", found, "Hz, kHz, MHz or GHz; S, Y, Z, G or H; MA, DB or RI; R and a number", "Correct the option line.");
 
+    public static MeasurementDataException RepeatedOption(SourcePlace place, string found) =>
+        new(place, "repeated-option", found, "one unit, one kind, one format and one R on the option line", "Delete the one that does not hold.");
+
+    public static MeasurementDataException RepeatedKeyword(SourcePlace place, string found) =>
+        new(place, "repeated-keyword", found, "each keyword once", "Delete the one that does not hold.");
+
+    public static MeasurementDataException KeywordAmongData(SourcePlace place, string found) =>
+        new(place, "keyword-among-data", found, "numbers, [Noise Data] once, or [End]", "Move the keyword before [Network Data].");
+
     public static MeasurementDataException BadReference(SourcePlace place, string found) =>
         new(place, "bad-reference", found, "a positive resistance in ohm behind R", "Correct the option line.");
 

@@ -7,10 +7,22 @@ namespace RangeReduce.Networks.Touchstone;
 /// <content>The keywords of version 2.</content>
 internal sealed partial class TouchstoneParser
 {
+    private static readonly HashSet<string> Once = new(StringComparer.Ordinal)
+    {
+        "number of ports", "two-port data order", "number of frequencies", "number of noise frequencies", "reference", "matrix format", "mixed-mode order",
+    };
+
+    private readonly HashSet<string> _keywords = new(StringComparer.Ordinal);
+
     private void ReadKeyword(ReadOnlySpan<byte> body, LineCursor lines)
     {
         var close = body.IndexOf((byte)']');
         var place = lines.Place();
+        if (close < 0 && _part == Part.Information)
+        {
+            return;
+        }
+
         if (close < 0)
         {
             throw TouchstoneErrors.UnknownKeyword(place, TouchstoneErrors.Quote(body));
@@ -25,7 +37,7 @@ internal sealed partial class TouchstoneParser
             return;
         }
 
-        _isAwaitingReference = false;
+        (_isAwaitingReference, _isPassingOver) = (false, false);
         if (keyword is "version")
         {
             ReadVersion(value, place);
@@ -42,6 +54,7 @@ internal sealed partial class TouchstoneParser
             throw TouchstoneErrors.MissingOptionLine(place, TouchstoneErrors.Quote(body));
         }
 
+        RefuseOutOfPlace(keyword, place, TouchstoneErrors.Quote(body));
         _lastKeyword = keyword;
         switch (keyword)
         {
@@ -83,9 +96,11 @@ internal sealed partial class TouchstoneParser
                 _part = Part.Information;
                 break;
             case "network data":
+                RefuseValue(value, place);
                 BeginNetworkData(place);
                 break;
             case "noise data":
+                RefuseValue(value, place);
                 RefuseNoiseUnlessTwoPorts(place);
                 CloseRecord();
                 _part = Part.Noise;
@@ -95,13 +110,37 @@ internal sealed partial class TouchstoneParser
                 _part = Part.End;
                 break;
             default:
-                if (_part != Part.Head)
-                {
-                    throw TouchstoneErrors.UnknownKeyword(place, TouchstoneErrors.Quote(body));
-                }
-
-                Remark("unknown-keyword", $"The keyword [{keyword}] is not known and was passed over.");
+                _isPassingOver = true;
+                Remark("unknown-keyword", $"The keyword [{keyword}] is not known and was passed over with what follows it.", severity: RemarkSeverity.Doubt);
                 break;
+        }
+    }
+
+    /// <summary>Holds the order of the file: header, network data, noise data, end; what a header keyword states holds for all data, so it cannot change among them.</summary>
+    private void RefuseOutOfPlace(string keyword, SourcePlace place, string found)
+    {
+        if (_part == Part.Head && keyword is "noise data" or "end" && _store is null)
+        {
+            throw TouchstoneErrors.MissingKeyword(place, "missing-network-data", "[Network Data]", found);
+        }
+
+        if ((_part == Part.Data && keyword is not ("noise data" or "end")) || (_part == Part.Noise && keyword is not "end"))
+        {
+            throw TouchstoneErrors.KeywordAmongData(place, found);
+        }
+
+        // Keywords that are not known are passed over, so they may stand twice.
+        if (Once.Contains(keyword) && !_keywords.Add(keyword))
+        {
+            throw TouchstoneErrors.RepeatedKeyword(place, found);
+        }
+    }
+
+    private static void RefuseValue(string value, SourcePlace place)
+    {
+        if (value.Length > 0)
+        {
+            throw TouchstoneErrors.BadKeywordValue(place, $"'{value[..Math.Min(40, value.Length)]}'", "data from the next line on");
         }
     }
 
@@ -149,9 +188,9 @@ internal sealed partial class TouchstoneParser
             throw TouchstoneErrors.MissingKeyword(place, "missing-number-of-frequencies", "[Number of Frequencies]", "[Network Data]");
         }
 
-        if (header.ReferenceOhm.Count > 0 && header.ReferenceOhm.Count != header.Ports)
+        if (header.ReferenceLine > 0 && header.ReferenceOhm.Count != header.Ports)
         {
-            throw TouchstoneErrors.ReferenceCount(new(file, header.ReferenceLine), header.ReferenceOhm.Count, header.Ports);
+            throw TouchstoneErrors.ReferenceCount(new(file, header.ReferenceLine, 1), header.ReferenceOhm.Count, header.Ports);
         }
 
         if (PortsByExtension(file) is var byExtension && byExtension > 0 && byExtension != header.Ports)
@@ -171,9 +210,9 @@ internal sealed partial class TouchstoneParser
                 : TouchstoneErrors.MissingEnd(end);
         }
 
-        if ((_store?.Count ?? 0) != _header!.Frequencies)
+        if ((_store?.Records ?? 0) != _header!.Frequencies)
         {
-            throw TouchstoneErrors.FrequencyCount(end, "[Number of Frequencies]", _header.Frequencies, _store?.Count ?? 0);
+            throw TouchstoneErrors.FrequencyCount(end, "[Number of Frequencies]", _header.Frequencies, _store?.Records ?? 0);
         }
 
         if (_noise.Count != _header.NoiseFrequencies)

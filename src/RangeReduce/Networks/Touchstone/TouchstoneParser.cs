@@ -21,12 +21,13 @@ internal sealed partial class TouchstoneParser(string file, TouchstoneOptions op
     private MatrixLayout? _layout;
     private double[] _record = new double[64];
     private int _recordCount;
-    private int _recordLine;
+    private SourcePlace _recordPlace;
     private int _ports;
     private int _line;
     private Part _part = Part.Head;
     private bool _wraps;
     private bool _isAwaitingReference;
+    private bool _isPassingOver;
     private string _lastKeyword = string.Empty;
 
     private enum Part
@@ -91,6 +92,10 @@ internal sealed partial class TouchstoneParser(string file, TouchstoneOptions op
         {
             ReadOption(body[1..], lines);
         }
+        else if (_isPassingOver)
+        {
+            return;
+        }
         else if (_isAwaitingReference)
         {
             ReadReferences(body, lines);
@@ -111,6 +116,10 @@ internal sealed partial class TouchstoneParser(string file, TouchstoneOptions op
         if (_comments.Count < 1000)
         {
             _comments.Add(Decoded(comment).Trim());
+        }
+        else
+        {
+            Remark("comments-left-out", "The file has more than 1000 comments; the others were left out.", lines.Number);
         }
     }
 
@@ -149,7 +158,7 @@ internal sealed partial class TouchstoneParser(string file, TouchstoneOptions op
         if (opens)
         {
             CloseRecord();
-            (_recordLine, _recordCount) = (lines.Number, 0);
+            (_recordPlace, _recordCount) = (lines.Place(), 0);
         }
         else if (_recordCount == 0 || _recordCount == CompleteRecord())
         {
@@ -219,7 +228,7 @@ internal sealed partial class TouchstoneParser(string file, TouchstoneOptions op
             return;
         }
 
-        var place = new SourcePlace(file, _recordLine);
+        var place = _recordPlace;
         if (_part == Part.Noise)
         {
             AddNoise(place);
@@ -245,10 +254,14 @@ internal sealed partial class TouchstoneParser(string file, TouchstoneOptions op
 
         if (_wraps && _ports == 2 && _header is null)
         {
-            Remark("two-port-record-split", "Two-port records run over more than one line.", _recordLine);
+            Remark("two-port-record-split", "Two-port records run over more than one line.", place.Line);
         }
 
-        _store!.Add(_record.AsSpan(0, _recordCount), _recordLine);
+        if (!_store!.TryAdd(_record.AsSpan(0, _recordCount), place))
+        {
+            Remark("repeated-point", "A frequency stands twice with the same values, of which one was kept.", place.Line, RemarkSeverity.Doubt);
+        }
+
         (_recordCount, _wraps) = (0, false);
     }
 
@@ -282,7 +295,7 @@ internal sealed partial class TouchstoneParser(string file, TouchstoneOptions op
             _layout = new(_ports, MatrixFormat.Full, columnFirst: true);
             if (_option!.ReferenceOhm.Length != 1 && _option.ReferenceOhm.Length != _ports)
             {
-                throw TouchstoneErrors.ReferenceCount(new(file, _option.Line), _option.ReferenceOhm.Length, _ports);
+                throw TouchstoneErrors.ReferenceCount(new(file, _option.Line, _option.Column), _option.ReferenceOhm.Length, _ports);
             }
         }
 
@@ -293,10 +306,10 @@ internal sealed partial class TouchstoneParser(string file, TouchstoneOptions op
 
         if (_option!.Kind is ParameterKind.H or ParameterKind.G && _ports != 2)
         {
-            throw TouchstoneErrors.UnknownOption(new(file, _option.Line), $"{_option.Kind} parameters of {_ports.ToString(CultureInfo.InvariantCulture)} ports");
+            throw TouchstoneErrors.UnknownOption(new(file, _option.Line, _option.Column), $"{_option.Kind} parameters of {_ports.ToString(CultureInfo.InvariantCulture)} ports");
         }
 
-        _store = new(file, options, _layout, _ports, _option.Format);
+        _store = new(options, _layout, _ports, _option.Format);
         if (_header is null)
         {
             _part = Part.Data;
@@ -308,6 +321,11 @@ internal sealed partial class TouchstoneParser(string file, TouchstoneOptions op
         if (_recordCount != 5)
         {
             throw TouchstoneErrors.IncompleteRecord(place, _recordCount, "5 numbers of noise data");
+        }
+
+        if (_record[0] < 0.0)
+        {
+            throw TouchstoneErrors.BadFrequency(place, FormattableString.Invariant($"{_record[0]:R} Hz"));
         }
 
         if (_noise.Count > 0 && _record[0] <= _noise[^1].FrequencyHz)
@@ -323,7 +341,7 @@ internal sealed partial class TouchstoneParser(string file, TouchstoneOptions op
 
     private TouchstoneFile Finish()
     {
-        var end = new SourcePlace(file, Math.Max(1, _line));
+        var end = new SourcePlace(file, Math.Max(1, _line), 1);
         if (_option is null)
         {
             throw TouchstoneErrors.MissingOptionLine(end, "the end of the file");

@@ -16,12 +16,13 @@ public static class TouchstoneReader
     {
         options ??= new();
         using var stream = new FileStream(path, FileMode.Open, FileAccess.Read, FileShare.Read, bufferSize: 0, FileOptions.SequentialScan);
+        RefuseBinary(stream, displayPath);
         if (stream.Length > options.LargestFile)
         {
-            RefuseBinary(stream, displayPath);
             throw TouchstoneErrors.TooMuch(new(displayPath), FormattableString.Invariant($"a file of {stream.Length} bytes"), FormattableString.Invariant($"at most {options.LargestFile}"));
         }
 
+        stream.Position = 0;
         var bytes = new byte[stream.Length];
         stream.ReadExactly(bytes);
         return Parse(bytes, displayPath, options);
